@@ -1,0 +1,14 @@
+// SPDX-License-Identifier: MPL-2.0
+#include "registration/argument.h"
+
+namespace registration {
+
+void refuse_condition(int argument, Given const& given, std::size_t row, const char* condition) {
+    core::Failure failure(core::Failure::Kind::impossible, written(given.block(), row),
+                          std::string("a value ") + condition,
+                          "check the sign and the unit of the number");
+    failure.argument = argument;
+    throw failure;
+}
+
+} // namespace registration

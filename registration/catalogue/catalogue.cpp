@@ -1,0 +1,46 @@
+// SPDX-License-Identifier: MPL-2.0
+#include "registration/catalogue/catalogue.h"
+
+#include <cctype>
+
+namespace registration::catalogue {
+
+std::span<const Section> sections() {
+    static const Section all[] = {
+        {"Phase change", phase_change()},
+        {"Heat crossing a boundary", heat()},
+        {"Simple processes", simple_processes()},
+        {"Mixing", mixing()},
+        {"Balances and the second law", balance()},
+        {"End states", end_states()},
+        {"Where data are missing", missing_data()},
+        {"Chemical formulas", formulas()},
+        {"Quantities", quantities()},
+        {"About", about()},
+    };
+    return all;
+}
+
+std::string id(Entry const& entry) {
+    std::string text;
+    bool upper = false;
+    for (const char* c = entry.name; *c; ++c) {
+        if (*c == '.')
+            upper = true;
+        else {
+            const auto letter = static_cast<unsigned char>(*c);
+            text += static_cast<char>(upper ? std::toupper(letter) : std::tolower(letter));
+            upper = false;
+        }
+    }
+    return text;
+}
+
+Entry const* find(std::string_view name) {
+    for (Section const& section : sections())
+        for (Entry const& entry : section.entries)
+            if (name == entry.name) return &entry;
+    return nullptr;
+}
+
+} // namespace registration::catalogue

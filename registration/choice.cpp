@@ -1,0 +1,109 @@
+// SPDX-License-Identifier: MPL-2.0
+#include "registration/choice.h"
+
+#include <algorithm>
+#include <optional>
+#include <string>
+#include <vector>
+
+namespace registration {
+namespace {
+
+using core::Failure;
+
+/// Arguments beyond the parameters of an overload must be left out.
+bool fits(Overload const& overload, std::span<const Given> inputs, std::size_t input) {
+    if (input >= overload.needs.size()) return inputs[input].missing();
+    return accepts(overload.needs[input], inputs[input]);
+}
+
+bool fits(Overload const& overload, std::span<const Given> inputs) {
+    for (std::size_t input = 0; input < inputs.size(); ++input)
+        if (!fits(overload, inputs, input)) return false;
+    return true;
+}
+
+struct Misfits {
+    std::size_t count = 0, first = 0;
+};
+Misfits misfits(Overload const& overload, std::span<const Given> inputs) {
+    Misfits found;
+    for (std::size_t input = inputs.size(); input-- > 0;)
+        if (!fits(overload, inputs, input)) found = {found.count + 1, input};
+    return found;
+}
+
+/// Fewer misfits; among equals the earlier arguments are taken at their word.
+bool better(Misfits a, Misfits b) {
+    return a.count != b.count ? a.count < b.count : a.first > b.first;
+}
+
+std::string joined(std::vector<std::string> const& words) {
+    std::string text;
+    for (std::size_t i = 0; i < words.size(); ++i) {
+        if (i > 0) text += i + 1 == words.size() ? " or " : ", ";
+        text += words[i];
+    }
+    return text;
+}
+
+/// An argument that cannot be read in any language is told before one that merely does not fit.
+std::optional<Failure> unreadable(Entry const& entry, std::span<const Given> inputs) {
+    for (std::size_t input = 0; input < inputs.size(); ++input) {
+        if (inputs[input].missing() || inputs[input].if_numbers()) continue;
+        bool only_numbers = true;
+        for (Form const& form : entry.all_forms())
+            for (Overload const& overload : form.overloads)
+                only_numbers =
+                    only_numbers && (input >= overload.needs.size() ||
+                                     overload.needs[input].kind == Need::Kind::quantity ||
+                                     overload.needs[input].kind == Need::Kind::any_quantity);
+        if (!only_numbers) continue;
+        Failure failure = inputs[input].why_not_numbers();
+        failure.argument = static_cast<int>(input);
+        return failure;
+    }
+    return std::nullopt;
+}
+
+/// "Which one argument, changed, would fit?"
+[[noreturn]] void refuse_all(Entry const& entry, std::span<const Given> inputs) {
+    if (auto failure = unreadable(entry, inputs)) throw *failure;
+    Overload const* best = nullptr;
+    Misfits fewest;
+    for (Form const& form : entry.all_forms())
+        for (Overload const& overload : form.overloads)
+            if (const Misfits found = misfits(overload, inputs); !best || better(found, fewest)) {
+                best = &overload;
+                fewest = found;
+            }
+    const std::size_t at = fewest.first;
+    Failure failure = at < best->needs.size()
+                          ? misfit(best->needs[at], inputs[at])
+                          : Failure(Failure::Kind::unfit, "a value",
+                                    "nothing here with the other arguments as they are",
+                                    "leave the argument out");
+    std::vector<std::string> needs;
+    for (Form const& form : entry.all_forms())
+        for (Overload const& overload : form.overloads) {
+            const Misfits found = misfits(overload, inputs);
+            if (found.count != fewest.count || found.first != at || at >= overload.needs.size())
+                continue;
+            const std::string text = described(overload.needs[at]);
+            if (std::ranges::find(needs, text) == needs.end()) needs.push_back(text);
+        }
+    if (!needs.empty()) failure.needed = joined(needs);
+    failure.argument = static_cast<int>(at);
+    throw failure;
+}
+
+} // namespace
+
+Choice choose(Entry const& entry, std::span<const Given> inputs) {
+    for (Form const& form : entry.all_forms())
+        for (Overload const& overload : form.overloads)
+            if (fits(overload, inputs)) return {&form, &overload};
+    refuse_all(entry, inputs);
+}
+
+} // namespace registration

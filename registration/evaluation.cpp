@@ -1,0 +1,366 @@
+// SPDX-License-Identifier: MPL-2.0
+#include "registration/evaluation.h"
+
+#include "core/substances/formula.h"
+#include "core/text/quantity.h"
+
+#include <algorithm>
+#include <cmath>
+
+namespace registration {
+namespace {
+
+using core::Dimension;
+using core::Failure;
+
+constexpr std::size_t most_uncertain_inputs = 1000;
+constexpr Dimension molar_mass_dimension = core::dimension<core::MolarMass>;
+
+/// Energy or entropy as such, not per mole and not per kilogram.
+bool is_extensive(Dimension d) { return d.mass == 1 && d.amount == 0; }
+
+bool is_amount(Dimension d) {
+    return d == core::dimension<core::Mass> || d == core::dimension<core::AmountOfSubstance> ||
+           d == core::dimension<core::MassFlow> || d == core::dimension<core::MolarFlow>;
+}
+
+bool is_quantity(Need const& need) {
+    return need.kind == Need::Kind::quantity || need.kind == Need::Kind::any_quantity;
+}
+
+std::size_t count_of(Need const& need, Given const& given) {
+    return is_quantity(need) ? given.numbers().count() : given.cell_count();
+}
+
+bool across_of(Need const& need, Given const& given) {
+    return is_quantity(need) ? given.numbers().across : given.cells_across();
+}
+
+bool is_blank(Need const& need, Given const& given, std::size_t row) {
+    if (is_quantity(need)) return std::ranges::binary_search(given.numbers().blanks, row);
+    return given.cell(row).kind == Cell::Kind::blank;
+}
+
+/// Whether no row of a column needs attention; for columns of numbers a look, not a loop.
+bool is_clean(Need const& need, Given const& given) {
+    if (is_quantity(need)) return given.numbers().faults.empty() && given.numbers().blanks.empty();
+    for (std::size_t row = 0; row < given.cell_count(); ++row)
+        if (given.cell(row).kind != Cell::Kind::text) return false;
+    return true;
+}
+
+Block block_of(Entry const& entry, std::span<const Block> blocks, Argument::Role role) {
+    const std::size_t at = entry.position(role);
+    return at < blocks.size() && at < entry.argument_count() ? blocks[at] : Block{};
+}
+
+[[noreturn]] void refuse_lengths(int argument, std::size_t count, std::size_t other) {
+    Failure failure(Failure::Kind::unfit, std::to_string(count) + " rows",
+                    "columns of one length, here " + std::to_string(other) + " rows",
+                    "select the same rows for every column");
+    failure.argument = argument;
+    throw failure;
+}
+
+} // namespace
+
+Arguments::Arguments(Entry const& entry, std::span<const Block> blocks)
+    : amount(block_of(entry, blocks, Argument::Role::amount)),
+      show(block_of(entry, blocks, Argument::Role::show)) {
+    for (std::size_t at = 0; at < entry.argument_count(); ++at)
+        if (entry.arguments[at].role == Argument::Role::input)
+            inputs.emplace_back(at < blocks.size() ? blocks[at] : Block{});
+}
+
+Evaluation::Evaluation(Entry const& entry, Arguments& arguments)
+    : entry_(entry), arguments_(arguments), choice_(choose(entry, arguments.given())),
+      outcome_(choice_.overload->outcome) {
+    align_whole_columns();
+    overload().check(arguments_.given());
+    measure();
+    mark_rows();
+    if (outcome_.follows_first) {
+        Numbers const& first = arguments_.inputs[0].numbers();
+        outcome_.dimension = first.dimension;
+        outcome_.reading = first.reading;
+        share_ = first.share;
+    }
+    if (!arguments_.amount.missing()) weigh_amount();
+}
+
+/// Blank rows of a whole column are left out, together with the row beside them; a row that is
+/// blank in only one of two columns that belong together is refused.
+void Evaluation::align_whole_columns() {
+    auto& inputs = arguments_.inputs;
+    for (std::size_t i = 0; i < overload().needs.size(); ++i) {
+        Need const& need = overload().needs[i];
+        if (!need.whole || inputs[i].missing()) continue;
+        const std::size_t other = entry_.beside(i);
+        if (other >= overload().needs.size() || inputs[other].missing()) continue;
+        const std::size_t count = count_of(need, inputs[i]);
+        const std::size_t other_count = count_of(overload().needs[other], inputs[other]);
+        if (count != other_count) refuse_lengths(static_cast<int>(i), count, other_count);
+        for (std::size_t row = 0; row < count; ++row) {
+            if (is_blank(need, inputs[i], row) ==
+                is_blank(overload().needs[other], inputs[other], row))
+                continue;
+            Failure failure(Failure::Kind::unfit,
+                            "row " + std::to_string(row + 1) +
+                                " blank in one of two columns that belong together",
+                            "both filled or both blank in every row",
+                            "fill the row in both columns or clear it in both");
+            failure.argument = static_cast<int>(i);
+            throw failure;
+        }
+    }
+    for (std::size_t i = 0; i < overload().needs.size(); ++i) {
+        Need const& need = overload().needs[i];
+        if (!need.whole || inputs[i].missing() || need.kind == Need::Kind::table) continue;
+        if (is_quantity(need) && !inputs[i].numbers().faults.empty()) {
+            RowFault const& fault = inputs[i].numbers().faults.front();
+            Failure failure = fault.failure;
+            failure.argument = static_cast<int>(i);
+            failure.given.append(", row ").append(std::to_string(fault.row + 1));
+            throw failure;
+        }
+        std::vector<std::size_t> blanks;
+        const std::size_t count = count_of(need, inputs[i]);
+        for (std::size_t row = 0; row < count; ++row)
+            if (is_blank(need, inputs[i], row)) blanks.push_back(row);
+        if (i == 0) blanks_of_first_ = blanks;
+        if (outcome_.column && i == 0) across_ = across_of(need, inputs[i]);
+        if (blanks.size() == count) {
+            Failure failure(Failure::Kind::unfit, "blank cells only", "at least one value",
+                            "fill the column");
+            failure.argument = static_cast<int>(i);
+            throw failure;
+        }
+        if (!blanks.empty()) inputs[i].drop(blanks);
+    }
+}
+
+void Evaluation::measure(Given const& given, std::size_t count, bool across, int position) {
+    if (given.missing() || count == 1) return;
+    if (rows_ != 1 && count != rows_) refuse_lengths(position, count, rows_);
+    if (rows_ != 1 && across != across_) {
+        Failure failure(Failure::Kind::unfit, "a row of cells beside columns",
+                        "columns only, or rows only, in one call",
+                        "lay all of them out the same way");
+        failure.argument = position;
+        throw failure;
+    }
+    rows_ = count;
+    across_ = across;
+}
+
+void Evaluation::measure() {
+    for (std::size_t i = 0; i < overload().needs.size(); ++i) {
+        Given const& given = arguments_.inputs[i];
+        Need const& need = overload().needs[i];
+        if (given.missing() || need.whole) continue;
+        measure(given, count_of(need, given), across_of(need, given), static_cast<int>(i));
+    }
+    if (!arguments_.amount.missing()) {
+        Numbers const& amount = arguments_.amount.numbers();
+        measure(arguments_.amount, amount.count(), amount.across,
+                static_cast<int>(arguments_.inputs.size()));
+    }
+}
+
+std::vector<Evaluation::Listed> Evaluation::listed_columns() const {
+    std::vector<Listed> columns;
+    const auto add = [&](Given const& given, Need const& need, std::size_t position) {
+        if (!given.missing() && !need.whole && count_of(need, given) > 1)
+            columns.push_back({&given, &need, static_cast<int>(position)});
+    };
+    static constexpr Need amount_need{.kind = Need::Kind::any_quantity};
+    for (std::size_t i = 0; i < overload().needs.size(); ++i)
+        add(arguments_.inputs[i], overload().needs[i], i);
+    add(arguments_.amount, amount_need, arguments_.inputs.size());
+    return columns;
+}
+
+void Evaluation::spoil(std::size_t row, Failure failure, int position) {
+    if (states_[row] == State::bad) return;
+    states_[row] = State::bad;
+    failure.argument = position;
+    faults_.push_back({row, std::move(failure)});
+}
+
+/// A row blank in every column is blank; blank in only some, or with a fault, it is bad.
+void Evaluation::mark_rows() {
+    if (rows_ == 1) return;
+    const auto columns = listed_columns();
+    if (std::ranges::all_of(columns, [](Listed const& c) { return is_clean(*c.need, *c.given); }))
+        return;
+    states_.assign(rows_, State::good);
+    for (Listed const& column : columns) {
+        if (is_quantity(*column.need))
+            for (RowFault const& fault : column.given->numbers().faults)
+                spoil(fault.row, fault.failure, column.position);
+        else if (column.need->kind != Need::Kind::cell)
+            for (std::size_t row = 0; row < rows_; ++row)
+                if (column.given->cell(row).kind == Cell::Kind::number)
+                    spoil(row,
+                          Failure(Failure::Kind::unfit, "a number", described(*column.need),
+                                  "write it as text"),
+                          column.position);
+    }
+    for (std::size_t row = 0; row < rows_; ++row) {
+        const auto blanks = std::ranges::count_if(
+            columns, [&](Listed const& c) { return is_blank(*c.need, *c.given, row); });
+        if (blanks == std::ssize(columns))
+            states_[row] = State::blank;
+        else if (blanks > 0)
+            spoil(row,
+                  Failure(Failure::Kind::unfit,
+                          "a row that is blank in some columns and filled in others",
+                          "a row filled in every column", "fill the blank cell or clear the row"),
+                  -1);
+    }
+}
+
+double molar_mass_of(Given const& given, std::size_t row) {
+    if (Numbers const* numbers = given.if_numbers();
+        numbers && numbers->dimension == molar_mass_dimension)
+        return given.si()[numbers->listed ? row : 0];
+    return core::substances::molar_mass(given.cell(row).text).value();
+}
+
+std::optional<double> Evaluation::molar_mass(std::size_t row) const {
+    for (std::size_t i = 0; i < overload().needs.size(); ++i)
+        if (overload().needs[i].kind == Need::Kind::substance && !arguments_.inputs[i].missing())
+            return molar_mass_of(arguments_.inputs[i], row);
+    return std::nullopt;
+}
+
+void Evaluation::weigh_amount() {
+    Given const& given = arguments_.amount;
+    Numbers const& amount = given.numbers();
+    const auto refuse = [&](std::string needed, std::string repair) {
+        Failure failure(Failure::Kind::unfit, written(given.block(), 0), std::move(needed),
+                        std::move(repair));
+        failure.argument = static_cast<int>(arguments_.inputs.size());
+        throw failure;
+    };
+    if (!is_amount(amount.dimension) || amount.reading != Reading::plain)
+        refuse("an amount: mol, kg, or either per unit of time",
+               "give it in a unit such as mol, kmol, kg, mol/s or kg/h");
+    if (outcome_.kind == Outcome::Kind::text || is_extensive(outcome_.dimension))
+        refuse("no amount, since the other arguments already are of the whole",
+               "leave the amount out");
+    const Dimension product = outcome_.dimension * amount.dimension;
+    if (!is_extensive(product)) {
+        if (is_extensive(product / molar_mass_dimension))
+            bridge_ = Bridge::over_molar_mass;
+        else if (is_extensive(product * molar_mass_dimension))
+            bridge_ = Bridge::times_molar_mass;
+        const bool known = molar_mass(0).has_value();
+        if (bridge_ == Bridge::none || !known)
+            refuse(outcome_.dimension.amount == -1
+                       ? "an amount in mol, since the result is molar"
+                       : "an amount in kg, since the result is per kilogram",
+                   "give the amount on the basis of the other arguments (MOLAR.MASS converts)");
+    }
+    outcome_.dimension = bridge_ == Bridge::over_molar_mass    ? product / molar_mass_dimension
+                         : bridge_ == Bridge::times_molar_mass ? product * molar_mass_dimension
+                                                               : product;
+}
+
+void Evaluation::multiply(Results& results) const {
+    Given const& given = arguments_.amount;
+    const std::size_t stride = given.numbers().listed ? 1 : 0;
+    const double* amounts = given.si();
+    for (std::size_t row = 0; row < results.numbers.size(); ++row) {
+        if (results.failed(row) || (!states_.empty() && states_[row] != State::good)) continue;
+        const double amount = amounts[row * stride];
+        if (!(amount >= 0)) {
+            Failure failure(Failure::Kind::impossible, written(given.block(), row * stride),
+                            "an amount of 0 or more",
+                            "check the sign, and let the order of the other arguments say which "
+                            "way the change goes");
+            failure.argument = static_cast<int>(arguments_.inputs.size());
+            results.fail(row, std::move(failure));
+            continue;
+        }
+        double value = results.numbers[row] * amount;
+        if (bridge_ == Bridge::over_molar_mass) value /= *molar_mass(row);
+        if (bridge_ == Bridge::times_molar_mass) value *= *molar_mass(row);
+        results.put(row, value);
+    }
+}
+
+Results Evaluation::results(core::Notes const& notes, bool explain) const {
+    Results results(outcome_, rows_, explain);
+    const auto run = overload().run;
+    if (states_.empty()) {
+        run(arguments_.given(), 0, rows_, results, notes);
+    } else {
+        for (std::size_t row = 0; row < rows_;) {
+            std::size_t end = row;
+            while (end < rows_ && states_[end] == State::good) ++end;
+            if (end > row) run(arguments_.given(), row, end, results, notes);
+            row = end + 1;
+        }
+        for (RowFault const& fault : faults_) results.fail(fault.row, fault.failure);
+    }
+    if (!arguments_.amount.missing()) multiply(results);
+    return results;
+}
+
+template<class Move>
+void Evaluation::add_variance(std::vector<double>& variance, Results const& nominal, Given& given,
+                              bool& one_sided, Move move) {
+    const auto moved = [&](double times) {
+        move(given, times);
+        Results result = results(core::silent, false);
+        given.move_back();
+        return result;
+    };
+    const Results plus = moved(1), minus = moved(-1);
+    for (std::size_t row = 0; row < variance.size(); ++row) {
+        if (nominal.failed(row)) continue;
+        const bool up = !plus.failed(row), down = !minus.failed(row);
+        const double value = nominal.numbers[row];
+        const double half = up && down ? (plus.numbers[row] - minus.numbers[row]) / 2
+                            : up       ? plus.numbers[row] - value
+                            : down     ? value - minus.numbers[row]
+                                       : error_number(Failure::Kind::impossible);
+        one_sided = one_sided || up != down;
+        variance[row] = half == half ? variance[row] + half * half : half;
+    }
+}
+
+std::vector<double> Evaluation::uncertainties(Results const& nominal,
+                                              std::vector<std::string>* remarks) {
+    std::vector<double> variance(nominal.numbers.size(), 0.0);
+    if (outcome_.kind == Outcome::Kind::text) return variance;
+    bool one_sided = false;
+    std::size_t inputs = 0;
+    const auto move_input = [&](Given& given, bool whole) {
+        Numbers const* numbers = given.missing() ? nullptr : given.if_numbers();
+        if (!numbers || !numbers->uncertain()) return;
+        if (!whole)
+            return add_variance(variance, nominal, given, one_sided,
+                                [](Given& g, double times) { g.move_all(times); });
+        for (std::size_t row = 0; row < numbers->u.size(); ++row) {
+            if (numbers->u[row] == 0) continue;
+            if (++inputs > most_uncertain_inputs)
+                core::refuse_impossible("more than 1000 inputs with an uncertainty",
+                                        "at most 1000 of them a result",
+                                        "balance parts of the plant first");
+            add_variance(variance, nominal, given, one_sided,
+                         [row](Given& g, double times) { g.move_one(row, times); });
+        }
+    };
+    for (std::size_t i = 0; i < overload().needs.size(); ++i)
+        move_input(arguments_.inputs[i], overload().needs[i].whole);
+    if (!arguments_.amount.missing()) move_input(arguments_.amount, false);
+    if (one_sided && remarks)
+        remarks->push_back("one side of an input's uncertainty is out of range, so the other "
+                           "side's difference was taken");
+    for (double& v : variance) v = v == v ? std::sqrt(v) : v;
+    return variance;
+}
+
+} // namespace registration

@@ -1,0 +1,71 @@
+// SPDX-License-Identifier: MPL-2.0
+#pragma once
+
+#include "core/column.h"
+#include "registration/numbers.h"
+
+#include <cstddef>
+#include <optional>
+#include <span>
+#include <string>
+#include <string_view>
+
+namespace registration {
+
+/// One argument of one call. It is read only when an overload asks, in the language that overload
+/// speaks: the same text may be a quantity to one and a mixture to another. What was read is kept
+/// for the rest of the call.
+class Given {
+public:
+    Given() = default;
+    explicit Given(Block block) : block_(block) {}
+
+    bool missing() const { return block_.missing(); }
+    Block block() const { return block_; }
+
+    /// Read as quantities; throws Failure where that cannot be done.
+    Numbers const& numbers() const;
+    /// The same without the throw: null where it cannot be read.
+    Numbers const* if_numbers() const;
+    core::Failure const& why_not_numbers() const { return *unreadable_; }
+
+    /// Rows as texts and cells, for arguments that are no quantities. A column of one repeats.
+    std::size_t cell_count() const { return block_.size(); }
+    bool cells_across() const { return block_.rows == 1 && block_.columns > 1; }
+    Cell const& cell(std::size_t row) const { return block_.cells[block_.single() ? 0 : row]; }
+
+    /// The rectangle as plain numbers, NaN for a blank cell.
+    core::Table table() const;
+    /// All rows as texts.
+    core::Formulas texts() const;
+    /// Whether a row has no content; valid for every kind of argument.
+    bool blank(std::size_t row) const;
+    /// Leaves rows out of a whole column: rising indices.
+    void drop(std::span<const std::size_t> rows);
+
+    // Moving an input to see what it does to the result (JCGM 100, 5.1.3 note 2). What is moved is
+    // a copy of this call's own; the sheet never sees it.
+    /// Moves every row by `times` its own standard uncertainty.
+    void move_all(double times);
+    /// Moves one row only, for functions of a whole column.
+    void move_one(std::size_t row, double times);
+    void move_back() { moved_.clear(); }
+
+    /// SI values as a function gets them: moved where they are.
+    const double* si() const { return moved_.empty() ? numbers().si.data() : moved_.data(); }
+    const double* u() const { return numbers().uncertain() ? numbers().u.data() : nullptr; }
+
+private:
+    void read() const;
+
+    Block block_{};
+    mutable bool asked_ = false;
+    mutable Numbers numbers_;
+    mutable std::optional<core::Failure> unreadable_;
+    mutable std::vector<double> table_;
+    mutable std::vector<std::string_view> texts_;
+    std::vector<std::size_t> dropped_;
+    boost::container::small_vector<double, 1> moved_;
+};
+
+} // namespace registration

@@ -1,0 +1,152 @@
+// SPDX-License-Identifier: MPL-2.0
+#include "registration/need.h"
+
+#include "core/quantities.h"
+#include "core/text/quantity.h"
+
+namespace registration {
+namespace {
+
+using core::Failure;
+
+bool fits_reading(Reading need, Reading given) {
+    return given == need || (given == Reading::plain && need != Reading::gauge);
+}
+
+/// Numbers without a unit are mole fractions where mole fractions are asked for; mass fractions
+/// must say so.
+bool fits_share(Share need, Share given) {
+    return given == need || (need == Share::mole && given == Share::none);
+}
+
+bool is_filled_text(Given const& given) {
+    for (std::size_t row = 0; row < given.cell_count(); ++row)
+        if (given.cell(row).kind != Cell::Kind::blank)
+            return given.cell(row).kind == Cell::Kind::text;
+    return false;
+}
+
+bool is_table(Given const& given) {
+    bool any = false;
+    for (std::size_t row = 0; row < given.cell_count(); ++row) {
+        if (given.cell(row).kind == Cell::Kind::text) return false;
+        any = any || given.cell(row).kind == Cell::Kind::number;
+    }
+    return any && !(given.block().single() && given.cell(0).number == 0);
+}
+
+bool fits_numbers(Need const& need, Given const& given) {
+    Numbers const* numbers = given.if_numbers();
+    return numbers && numbers->dimension == need.dimension &&
+           fits_reading(need.reading, numbers->reading) && fits_share(need.share, numbers->share);
+}
+
+std::string example_with_unit(Given const& given, Need const& need) {
+    const std::string unit =
+        need.reading == Reading::point ? "K" : core::text::si_unit(need.dimension);
+    return written(given.block(), 0) + " " + unit;
+}
+
+/// The numbers can be read, but are not of the kind that is needed.
+Failure wrong_kind(Need const& need, Given const& given, Numbers const& numbers) {
+    const std::string given_text = written(given.block(), 0);
+    const auto unfit = [&](std::string what, std::string repair) {
+        return Failure(Failure::Kind::unfit, std::move(what), described(need), std::move(repair));
+    };
+    if (numbers.bare)
+        return unfit(given_text + " without a unit",
+                     "write the unit the number is in, for example `" +
+                         example_with_unit(given, need) + "`");
+    if (numbers.dimension == need.dimension) {
+        if (numbers.reading == Reading::gauge)
+            return unfit(given_text + ", a gauge pressure",
+                         "make it absolute with PRESSURE.ABSOLUTE(gauge; atmospheric)");
+        if (need.reading == Reading::gauge)
+            return unfit(given_text + ", an absolute pressure",
+                         "mark a gauge pressure with (g), for example `5 bar(g)`");
+        if (numbers.reading == Reading::point)
+            return unfit(given_text + ", a point on a scale", "write the difference in K or Δ°C");
+        if (numbers.reading == Reading::difference)
+            return unfit(given_text + ", a temperature difference",
+                         "write the temperature itself in K or °C");
+        return unfit(given_text, "write a fraction of the kind that is asked for");
+    }
+    const core::Dimension molar = power(core::Dimension::of_mass / core::Dimension::of_amount, 1);
+    if (numbers.dimension * molar == need.dimension || numbers.dimension == need.dimension * molar)
+        return unfit(given_text + ", " + core::text::name_of(numbers.dimension),
+                     "give it on the other basis, molar and per mass are not the same (MOLAR.MASS "
+                     "converts)");
+    return unfit(given_text + ", " + core::text::name_of(numbers.dimension),
+                 "check which cell the argument refers to, and its unit");
+}
+
+} // namespace
+
+bool accepts(Need const& need, Given const& given) {
+    if (given.missing()) return need.optional;
+    switch (need.kind) {
+    case Need::Kind::quantity:
+        return fits_numbers(need, given);
+    case Need::Kind::any_quantity:
+        return given.if_numbers() != nullptr;
+    case Need::Kind::text:
+        return is_filled_text(given);
+    case Need::Kind::substance:
+        return is_filled_text(given) || fits_numbers(need, given);
+    case Need::Kind::cell:
+        return true;
+    case Need::Kind::table:
+        return is_table(given);
+    }
+    return false;
+}
+
+core::Failure misfit(Need const& need, Given const& given) {
+    if (given.missing())
+        return Failure(Failure::Kind::unfit, "nothing", described(need), "fill the argument in");
+    if (need.kind == Need::Kind::quantity || need.kind == Need::Kind::any_quantity) {
+        if (Numbers const* numbers = given.if_numbers()) return wrong_kind(need, given, *numbers);
+        return given.why_not_numbers();
+    }
+    Cell const& cell = given.cell(0);
+    const std::string text =
+        cell.kind == Cell::Kind::text ? std::string(cell.text)
+        : cell.kind == Cell::Kind::number
+            ? "the number " + core::text::write_number(static_cast<long double>(cell.number), 6)
+            : "a blank cell";
+    return Failure(Failure::Kind::unfit, text, described(need),
+                   need.kind == Need::Kind::table ? "select cells that hold plain numbers"
+                                                  : "write it as text");
+}
+
+std::string described(Need const& need) {
+    const std::string condition =
+        need.condition[0] ? std::string(" ") + need.condition : std::string();
+    switch (need.kind) {
+    case Need::Kind::any_quantity:
+        return "a quantity with its unit";
+    case Need::Kind::text:
+        return "a text";
+    case Need::Kind::substance:
+        return "a chemical formula, or a molar mass";
+    case Need::Kind::cell:
+        return "a cell";
+    case Need::Kind::table:
+        return "plain numbers";
+    case Need::Kind::quantity:
+        break;
+    }
+    if (need.reading == Reading::gauge) return "a gauge pressure, marked (g)";
+    if (need.reading == Reading::difference)
+        return "a temperature difference in K or Δ°C" + condition;
+    if (need.reading == Reading::point) return "a temperature in K, °C, °F or °R, above 0 K";
+    if (need.dimension == core::Dimension{}) {
+        if (need.share == Share::mole) return "mole fractions";
+        if (need.share == Share::mass) return "mass fractions, in wt%";
+        return "a number" + condition;
+    }
+    return core::text::name_of(need.dimension) + condition + ", such as `1 " +
+           core::text::si_unit(need.dimension) + "`";
+}
+
+} // namespace registration

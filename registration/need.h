@@ -1,0 +1,48 @@
+// SPDX-License-Identifier: MPL-2.0
+#pragma once
+
+#include "core/text/unit.h"
+#include "registration/given.h"
+
+#include <cstdint>
+#include <string>
+
+namespace registration {
+
+/// What one parameter of an overload asks of its argument; derived from the parameter's type
+/// (argument.h), never written by hand.
+struct Need {
+    enum class Kind : std::uint8_t {
+        quantity,     ///< numbers of the dimension below
+        any_quantity, ///< numbers of whatever dimension
+        text,         ///< a text in every row: a formula, a unit
+        substance,    ///< a formula, or where only its molar mass is needed that molar mass
+        cell,         ///< a cell as it stands
+        table,        ///< a rectangle of plain numbers
+    };
+
+    Kind kind = Kind::quantity;
+    core::Dimension dimension{};
+    Reading reading = Reading::plain;
+    Share share = Share::none;
+    bool optional = false;
+    bool whole = false;         ///< all rows are one argument of one result
+    const char* condition = ""; ///< "above 0", for the wizard and for `why`
+
+    /// Whether two parameters take the same arguments.
+    friend constexpr bool same(Need const& a, Need const& b) {
+        return a.kind == b.kind && a.dimension == b.dimension && a.reading == b.reading &&
+               a.share == b.share;
+    }
+};
+
+/// Whether the argument, as it stands, can be what the parameter needs.
+bool accepts(Need const&, Given const&);
+
+/// The same as a sentence part: what is wrong with it. Call only where accepts() is false.
+core::Failure misfit(Need const&, Given const&);
+
+/// What is needed, in words: `a temperature`, `a molar energy, J/mol`, `a chemical formula`.
+std::string described(Need const&);
+
+} // namespace registration
