@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: MPL-2.0
 #include "registration/argument.h"
 
+#include "registration/molar_mass.h"
+
 namespace registration {
 
 void refuse_condition(int argument, Given const& given, std::size_t row, const char* condition) {
@@ -9,6 +11,10 @@ void refuse_condition(int argument, Given const& given, std::size_t row, const c
                           "check the sign and the unit of the number");
     failure.argument = argument;
     throw failure;
+}
+
+void argument<NamedSubstance>::check(Given const& given) {
+    if (given.cell_count() == 1) static_cast<void>(molar_mass_of(given, 0));
 }
 
 } // namespace registration

@@ -242,13 +242,16 @@ struct argument<AnyQuantity> : Unchecked {
 /// amount and the unit of the result (evaluation.h).
 struct NamedSubstance {};
 template<>
-struct argument<NamedSubstance> : Unchecked {
+struct argument<NamedSubstance> {
     static constexpr Need need{.kind = Need::Kind::substance,
                                .dimension = core::dimension<core::MolarMass>};
     struct Rows {
         Rows(Given const&, int) {}
         NamedSubstance operator[](std::size_t) const { return {}; }
     };
+    /// A single substance must be known even where nothing asks for its molar mass; the rows of a
+    /// column are looked at one by one (evaluation.cpp).
+    static void check(Given const&);
 };
 
 template<>

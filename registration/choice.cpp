@@ -24,12 +24,13 @@ bool fits(Overload const& overload, std::span<const Given> inputs) {
 }
 
 struct Misfits {
-    std::size_t count = 0, first = 0;
+    std::size_t count = 0, first = 0; ///< one too many counts double: it can only be left out
 };
 Misfits misfits(Overload const& overload, std::span<const Given> inputs) {
     Misfits found;
     for (std::size_t input = inputs.size(); input-- > 0;)
-        if (!fits(overload, inputs, input)) found = {found.count + 1, input};
+        if (!fits(overload, inputs, input))
+            found = {found.count + (input < overload.needs.size() ? 1u : 2u), input};
     return found;
 }
 

@@ -1,8 +1,8 @@
 // SPDX-License-Identifier: MPL-2.0
 #include "registration/evaluation.h"
 
-#include "core/substances/formula.h"
 #include "core/text/quantity.h"
+#include "registration/molar_mass.h"
 
 #include <algorithm>
 #include <cmath>
@@ -24,26 +24,30 @@ bool is_amount(Dimension d) {
            d == core::dimension<core::MassFlow> || d == core::dimension<core::MolarFlow>;
 }
 
-bool is_quantity(Need const& need) {
+/// Whether an argument is looked at as numbers; a substance is where its molar mass stands for it.
+bool is_numeric(Need const& need, Given const& given) {
+    if (need.kind == Need::Kind::substance) return tells_molar_mass(given);
     return need.kind == Need::Kind::quantity || need.kind == Need::Kind::any_quantity;
 }
 
 std::size_t count_of(Need const& need, Given const& given) {
-    return is_quantity(need) ? given.numbers().count() : given.cell_count();
+    return is_numeric(need, given) ? given.numbers().count() : given.cell_count();
 }
 
 bool across_of(Need const& need, Given const& given) {
-    return is_quantity(need) ? given.numbers().across : given.cells_across();
+    return is_numeric(need, given) ? given.numbers().across : given.cells_across();
 }
 
 bool is_blank(Need const& need, Given const& given, std::size_t row) {
-    if (is_quantity(need)) return std::ranges::binary_search(given.numbers().blanks, row);
+    if (is_numeric(need, given)) return std::ranges::binary_search(given.numbers().blanks, row);
     return given.cell(row).kind == Cell::Kind::blank;
 }
 
 /// Whether no row of a column needs attention; for columns of numbers a look, not a loop.
 bool is_clean(Need const& need, Given const& given) {
-    if (is_quantity(need)) return given.numbers().faults.empty() && given.numbers().blanks.empty();
+    if (is_numeric(need, given))
+        return given.numbers().faults.empty() && given.numbers().blanks.empty();
+    if (need.kind == Need::Kind::substance) return false;
     for (std::size_t row = 0; row < given.cell_count(); ++row)
         if (given.cell(row).kind != Cell::Kind::text) return false;
     return true;
@@ -116,7 +120,7 @@ void Evaluation::align_whole_columns() {
     for (std::size_t i = 0; i < overload().needs.size(); ++i) {
         Need const& need = overload().needs[i];
         if (!need.whole || inputs[i].missing() || need.kind == Need::Kind::table) continue;
-        if (is_quantity(need) && !inputs[i].numbers().faults.empty()) {
+        if (is_numeric(need, inputs[i]) && !inputs[i].numbers().faults.empty()) {
             RowFault const& fault = inputs[i].numbers().faults.front();
             Failure failure = fault.failure;
             failure.argument = static_cast<int>(i);
@@ -187,6 +191,20 @@ void Evaluation::spoil(std::size_t row, Failure failure, int position) {
     faults_.push_back({row, std::move(failure)});
 }
 
+/// A text of a column that cannot be used spoils its row alone.
+void Evaluation::mark_text(Listed const& column, std::size_t row) {
+    Cell const& cell = column.given->cell(row);
+    if (cell.kind == Cell::Kind::blank) return;
+    try {
+        if (cell.kind == Cell::Kind::number)
+            core::refuse_unfit("a number", described(*column.need), "write it as text");
+        if (column.need->kind == Need::Kind::substance)
+            static_cast<void>(molar_mass_of(*column.given, row));
+    } catch (Failure& failure) {
+        spoil(row, std::move(failure), column.position);
+    }
+}
+
 /// A row blank in every column is blank; blank in only some, or with a fault, it is bad.
 void Evaluation::mark_rows() {
     if (rows_ == 1) return;
@@ -195,16 +213,11 @@ void Evaluation::mark_rows() {
         return;
     states_.assign(rows_, State::good);
     for (Listed const& column : columns) {
-        if (is_quantity(*column.need))
+        if (is_numeric(*column.need, *column.given))
             for (RowFault const& fault : column.given->numbers().faults)
                 spoil(fault.row, fault.failure, column.position);
         else if (column.need->kind != Need::Kind::cell)
-            for (std::size_t row = 0; row < rows_; ++row)
-                if (column.given->cell(row).kind == Cell::Kind::number)
-                    spoil(row,
-                          Failure(Failure::Kind::unfit, "a number", described(*column.need),
-                                  "write it as text"),
-                          column.position);
+            for (std::size_t row = 0; row < rows_; ++row) mark_text(column, row);
     }
     for (std::size_t row = 0; row < rows_; ++row) {
         const auto blanks = std::ranges::count_if(
@@ -220,13 +233,6 @@ void Evaluation::mark_rows() {
     }
 }
 
-double molar_mass_of(Given const& given, std::size_t row) {
-    if (Numbers const* numbers = given.if_numbers();
-        numbers && numbers->dimension == molar_mass_dimension)
-        return given.si()[numbers->listed ? row : 0];
-    return core::substances::molar_mass(given.cell(row).text).value();
-}
-
 std::optional<double> Evaluation::molar_mass(std::size_t row) const {
     for (std::size_t i = 0; i < overload().needs.size(); ++i)
         if (overload().needs[i].kind == Need::Kind::substance && !arguments_.inputs[i].missing())
@@ -238,8 +244,9 @@ void Evaluation::weigh_amount() {
     Given const& given = arguments_.amount;
     Numbers const& amount = given.numbers();
     const auto refuse = [&](std::string needed, std::string repair) {
-        Failure failure(Failure::Kind::unfit, written(given.block(), 0), std::move(needed),
-                        std::move(repair));
+        Failure failure(Failure::Kind::unfit,
+                        written(given.block(), 0) + (amount.bare ? " without a unit" : ""),
+                        std::move(needed), std::move(repair));
         failure.argument = static_cast<int>(arguments_.inputs.size());
         throw failure;
     };

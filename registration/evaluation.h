@@ -62,6 +62,7 @@ private:
 
     void align_whole_columns();
     std::vector<Listed> listed_columns() const;
+    void mark_text(Listed const&, std::size_t row);
     void spoil(std::size_t row, core::Failure, int position);
     void measure();
     void measure(Given const&, std::size_t count, bool across, int position);
@@ -84,8 +85,5 @@ private:
     std::vector<RowFault> faults_; ///< of the bad rows
     std::vector<std::size_t> blanks_of_first_;
 };
-
-/// The molar mass that a substance argument tells: of its formula, or the value itself.
-double molar_mass_of(Given const&, std::size_t row);
 
 } // namespace registration

@@ -3,6 +3,7 @@
 
 #include "core/quantities.h"
 #include "core/text/quantity.h"
+#include "registration/molar_mass.h"
 
 namespace registration {
 namespace {
@@ -92,7 +93,7 @@ bool accepts(Need const& need, Given const& given) {
     case Need::Kind::text:
         return is_filled_text(given);
     case Need::Kind::substance:
-        return is_filled_text(given) || fits_numbers(need, given);
+        return tells_molar_mass(given) ? fits_numbers(need, given) : is_filled_text(given);
     case Need::Kind::cell:
         return true;
     case Need::Kind::table:
@@ -145,8 +146,8 @@ std::string described(Need const& need) {
         if (need.share == Share::mass) return "mass fractions, in wt%";
         return "a number" + condition;
     }
-    return core::text::name_of(need.dimension) + condition + ", such as `1 " +
-           core::text::si_unit(need.dimension) + "`";
+    return core::text::name_of(need.dimension) + condition + " (" +
+           core::text::si_unit(need.dimension) + ")";
 }
 
 } // namespace registration

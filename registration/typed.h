@@ -42,9 +42,18 @@ private:
         return {argument<Parameter<I>>::need...};
     }
 
+    template<std::size_t I>
+    static void check_one(Given const& given) {
+        try {
+            argument<Parameter<I>>::check(given);
+        } catch (core::Failure& failure) {
+            failure.argument = static_cast<int>(I);
+            throw;
+        }
+    }
     template<std::size_t... I>
     static void check([[maybe_unused]] std::span<const Given> given, std::index_sequence<I...>) {
-        (argument<Parameter<I>>::check(given[I]), ...);
+        (check_one<I>(given[I]), ...);
     }
     static void check(std::span<const Given> given) {
         check(given, std::make_index_sequence<count>{});

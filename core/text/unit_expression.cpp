@@ -33,8 +33,12 @@ bool is_symbol_start(char32_t c) {
 bool is_foreign_letter(char32_t c) {
     return c >= 0x00C0 && c < 0x2000 && c != 0x00D7 && c != 0x00F7;
 }
-bool goes_on_in_symbol(char32_t c) {
-    return is_symbol_start(c) || is_digit(c) || (c >= 128 && is_foreign_letter(c));
+/// Degree signs begin a name: in `lb°F` a new one, in `Δ°C` the rest of one.
+bool goes_on_in_symbol(char32_t c, char32_t previous) {
+    if (c < 128) return starts_symbol[c] || is_digit(c);
+    bool const begins =
+        c == degree_sign || c == delta || c == degree_celsius || c == degree_fahrenheit;
+    return begins ? previous == delta : is_symbol_start(c) || is_foreign_letter(c);
 }
 
 bool is_coverage(Cursor at) {
@@ -47,17 +51,16 @@ bool is_coverage(Cursor at) {
 
 bool is_operator(char32_t c) { return c == U'/' || c == U'.' || is_product_sign(c); }
 
-/// Whether another factor follows, behind an operator or a space; passes over what stands before
-/// it.
+/// Whether another factor follows, behind an operator, a hyphen, a space or nothing; passes over
+/// what stands before it.
 bool take_join(Cursor& at) {
     Cursor ahead = at;
-    bool joined = ahead.skip_spaces();
+    ahead.skip_spaces();
     if (is_operator(*ahead) || *ahead == U'-') {
-        joined = true;
         ahead.advance();
         ahead.skip_spaces();
     }
-    if (!joined || !UnitExpression::starts(ahead)) return false;
+    if (!UnitExpression::starts(ahead)) return false;
     at = ahead;
     return true;
 }
@@ -182,7 +185,7 @@ void UnitExpression::quotient(Unit& unit) {
     factor(below);
     make_part(below);
     multiply(unit, below, -1);
-    if (goes_on(at_)) refuse_second_solidus(first_factor);
+    if (!at_.at_end() && goes_on(at_)) refuse_second_solidus(first_factor);
 }
 
 void UnitExpression::product(Unit& unit) {
@@ -236,12 +239,14 @@ void UnitExpression::symbol(Unit& unit) {
     const char* const start = at_.position();
     const char* base_end = start;
     FoldedName name;
-    for (bool ended = false; !ended && goes_on_in_symbol(*at_);) {
+    for (bool ended = false; !ended;) {
         ended = *at_ == U'%';
         bool const digit = is_digit(*at_);
-        name.push(*at_);
+        char32_t const previous = *at_;
+        name.push(previous);
         at_.advance();
         if (!digit) base_end = at_.position();
+        ended = ended || !goes_on_in_symbol(*at_, previous);
     }
     if (*at_ == U' ' && take_percent(name.view())) name.push(U'%');
 
@@ -403,6 +408,10 @@ void refuse_rest(Cursor const& at) {
         refuse_unfit(shown(whole), needed + "; a hyphen does not multiply",
                      write_instead(std::string(whole.data(), at.position()) + "·" +
                                    std::string(rest_from(after_one(at)))));
+    if (UnitExpression::starts(at))
+        refuse_unfit(
+            shown(whole), needed + "; a sign of multiplication is missing",
+            write_instead(std::string(whole.data(), at.position()) + "·" + std::string(rest)));
     if (is_digit(*at))
         refuse_unfit(shown(whole), needed + "; a number stands inside it at " + quoted(rest),
                      "write one number, then the unit");

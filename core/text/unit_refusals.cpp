@@ -75,6 +75,7 @@ constexpr std::array refused{
     RefusedName{"MBH", more_than_one, "kBtu_IT/h", ""},
     RefusedName{"therm", more_than_one, "", "write `therm_US` or `therm_EC`"},
     RefusedName{"therms", more_than_one, "", "write `therm_US` or `therm_EC`"},
+    RefusedName{"e", "is no unit", "", "write `cal_th/(mol·K)` for the entropy unit e.u."},
     RefusedName{"eu", "is the entropy unit of old tables", "cal_th/(mol·K)", ""},
     RefusedName{"ton", more_than_one, "", tons},
     RefusedName{"tons", more_than_one, "", tons},

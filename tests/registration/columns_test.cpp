@@ -151,6 +151,25 @@ TEST(Columns, OfOneRowUnderAHeadingAreASingleQuantity) {
     EXPECT_EQ(answer.rows, 3u);
 }
 
+TEST(Columns, OfSubstancesKeepABadOneToItself) {
+    const Range gases = Range::column({"N2", "Xx", "O2"});
+    const Answer answer = call("ENTROPY.ISOTHERMAL", {"1 bar", "2 bar", "3 kg", gases});
+    ASSERT_EQ(answer.rows, 3u);
+    EXPECT_LT(answer.numbers[0], 0);
+    EXPECT_EQ(text(answer, 1), "#VALUE!");
+    EXPECT_LT(answer.numbers[2], 0);
+}
+
+TEST(Columns, OfMolarMassesServeAsSubstances) {
+    const double of_formula =
+        tests::number(call("ENTROPY.ISOTHERMAL", {"1 bar", "2 bar", "3 kg", "N2"}));
+    for (const Range& mass : {Range::row({28.014, "g/mol"}), Range::column({"M / (g/mol)", 28.014}),
+                              Range("28.014 g/mol")})
+        EXPECT_DOUBLE_EQ(
+            tests::number(call("ENTROPY.ISOTHERMAL", {"1 bar", "2 bar", "3 kg", mass})),
+            of_formula);
+}
+
 TEST(Columns, StayFastWhereEveryRowIsBad) {
     std::vector<Range> cells{"K"};
     for (int i = 0; i < 20000; ++i) cells.push_back(-1.0);
