@@ -101,8 +101,8 @@ public:
     Answer answer() {
         if (show_.is_prose()) return prose();
         if (evaluation_.outcome().kind == Outcome::Kind::text) return texts_as_they_are();
-        const Results results = evaluation_.results(core::silent, false);
-        if (show_.view == View::number) return numbers(results);
+        Results results = evaluation_.results(core::silent, false);
+        if (show_.view == View::number) return numbers(std::move(results));
         return with_uncertainty(results);
     }
 
@@ -115,7 +115,7 @@ private:
             answer.numbers.resize(count);
         else
             answer.texts.resize(count);
-        for (std::size_t row = 0; row < count; ++row)
+        for (std::size_t row = 0; evaluation_.has_blanks() && row < count; ++row)
             if (evaluation_.blank(row)) answer.blanks.push_back(row);
         return answer;
     }
@@ -125,8 +125,12 @@ private:
             on_basis(results.numbers[row], target_.basis, evaluation_, row));
     }
 
-    Answer numbers(Results const& results) {
+    Answer numbers(Results results) {
         Answer answer = shaped(results.count(), Answer::Kind::numbers);
+        if (target_.unit.is_coherent() && target_.basis == Basis::same) {
+            answer.numbers = std::move(results.numbers);
+            return spread(std::move(answer));
+        }
         for (std::size_t row = 0; row < results.count(); ++row)
             answer.numbers[row] =
                 results.failed(row) ? results.numbers[row] : converted(results, row);

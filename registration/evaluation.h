@@ -42,6 +42,7 @@ public:
     Share share() const { return share_; }
     std::size_t rows() const { return rows_; }
     bool across() const { return across_; }
+    bool has_blanks() const { return !states_.empty(); }
     bool blank(std::size_t row) const { return !states_.empty() && states_[row] == State::blank; }
     std::vector<std::size_t> const& blanks_of_first() const { return blanks_of_first_; }
     /// What a mole of the substance of a row weighs, where the call names a substance.

@@ -307,8 +307,13 @@ void fill_headed(Form const& form, Filling& filling) {
         core::refuse_unfit(std::string(grid.at(0, 1).text),
                            "uncertainties of the dimension of their values",
                            "head the column `u`, and give it in the unit of the values");
+    const bool coherent = heading.unit.is_coherent();
     for (std::size_t row = 0; row < form.count(); ++row) {
         Cell const& cell = grid.at(row + 1, 0);
+        if (is_number(cell) && !with_u) { // nearly every row of nearly every column
+            filling.put(row, coherent ? cell.number : heading.unit.to_si(cell.number));
+            continue;
+        }
         if (is_blank(cell) && (!with_u || is_blank(grid.at(row + 1, 1)))) {
             filling.blank(row);
             continue;

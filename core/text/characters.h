@@ -70,6 +70,12 @@ public:
     std::string_view whole() const { return {begin_, static_cast<std::size_t>(end_ - begin_)}; }
     /// Where the character before this one ends and this one starts.
     const char* position() const { return start_; }
+    /// From this character on.
+    std::string_view rest() const { return {start_, static_cast<std::size_t>(end_ - start_)}; }
+    void pass_rest() {
+        start_ = next_ = end_;
+        here_ = 0;
+    }
 
 private:
     void load() {

@@ -163,10 +163,6 @@ double from_long_doubles(Decimal number, Unit const& unit) {
     return static_cast<double>(value * unit.numerator / unit.denominator);
 }
 
-bool is_plain_si(Unit const& unit) {
-    return unit.numerator == unit.denominator && unit.zero_numerator == 0;
-}
-
 Unit without_zero(Unit unit) {
     unit.zero_numerator = 0;
     unit.zero_denominator = 1;
@@ -189,6 +185,21 @@ Decimal parsed(const char* at, const char* end) {
     return number;
 }
 
+/// What people type has few places. A decimal of 15 digits at most is the only one of that length
+/// that a double can stand for, and whole / 10^places is rounded once: equality shows that it is it.
+std::optional<Decimal> short_decimal(double number) {
+    constexpr double limit = 9007199254740992.0; // 2^53
+    constexpr int places = 6;
+    double const size = std::fabs(number);
+    if (size < limit && std::trunc(size) == size)
+        return Decimal{static_cast<std::uint64_t>(size), 0, std::signbit(number)};
+    double const scaled = size * small_powers_of_ten[places];
+    if (!(scaled < 1e15)) return {};
+    auto const whole = static_cast<std::uint64_t>(scaled + 0.5);
+    if (static_cast<double>(whole) / small_powers_of_ten[places] != size) return {};
+    return without_trailing_zeros({whole, -places, std::signbit(number)});
+}
+
 std::string exponent_text(int exponent, PowerOfTen style) {
     if (style == PowerOfTen::ascii) return "e" + std::to_string(exponent);
     constexpr std::array<const char*, 10> digits{"⁰", "¹", "²", "³", "⁴", "⁵", "⁶", "⁷", "⁸", "⁹"};
@@ -201,9 +212,7 @@ std::string exponent_text(int exponent, PowerOfTen style) {
 } // namespace
 
 Decimal shortest_decimal(double number) {
-    constexpr double limit = 9007199254740992.0; // 2^53
-    if (std::fabs(number) < limit && std::trunc(number) == number)
-        return {static_cast<std::uint64_t>(std::fabs(number)), 0, std::signbit(number)};
+    if (auto const decimal = short_decimal(number)) return *decimal;
     std::array<char, 32> text{};
     auto const written = std::to_chars(text.data(), text.data() + text.size(), number,
                                        std::chars_format::scientific);
@@ -222,7 +231,7 @@ double nearest_double(Decimal number) {
 double in_si(Decimal number, Unit const& unit) {
     if (auto const value = from_small_numbers(number, unit)) return *value;
     if (auto const value = from_wide_numbers(number, unit)) return *value;
-    return is_plain_si(unit) ? nearest_double(number) : from_long_doubles(number, unit);
+    return unit.is_coherent() ? nearest_double(number) : from_long_doubles(number, unit);
 }
 
 double span_in_si(Decimal number, Unit const& unit) {
@@ -230,7 +239,7 @@ double span_in_si(Decimal number, Unit const& unit) {
 }
 
 double Unit::to_si(double number) const {
-    if (is_plain_si(*this) || !std::isfinite(number)) return number;
+    if (is_coherent() || !std::isfinite(number)) return number;
     return in_si(shortest_decimal(number), *this);
 }
 
@@ -250,8 +259,16 @@ long double decimal_from_si(double si, Unit const& unit) {
            (below * unit.zero_denominator);
 }
 
+double Unit::from_si(double si) const {
+    if (is_coherent() || !std::isfinite(si)) return si;
+    if (short_decimal(si)) return static_cast<double>(decimal_from_si(si, *this));
+    // A computed number stands for no decimal: straight through, rounded once.
+    long double const value = static_cast<long double>(si) * denominator / numerator;
+    return static_cast<double>(value - zero_numerator / zero_denominator);
+}
+
 long double Unit::exactly_from_si(double si) const {
-    return is_plain_si(*this) ? si : decimal_from_si(si, *this);
+    return is_coherent() ? si : decimal_from_si(si, *this);
 }
 
 double Unit::span_from_si(double si) const {
@@ -293,21 +310,24 @@ int leading_place(Decimal number) {
     return place;
 }
 
-std::string written(Decimal number, int widest, PowerOfTen style) {
+std::string written_plainly(Decimal number) {
     std::string digits = std::to_string(number.significand);
     std::string const sign = number.negative && number.significand != 0 ? "-" : "";
-    int const lead = leading_place(number);
-    bool const is_zero = number.significand == 0;
-    if (!is_zero && (lead >= widest || lead < -4)) {
-        if (digits.size() > 1) digits.insert(1, ".");
-        return sign + digits + exponent_text(lead, style);
+    if (number.exponent >= 0) {
+        bool const is_zero = number.significand == 0;
+        return sign + digits.append(is_zero ? 0 : static_cast<std::size_t>(number.exponent), '0');
     }
-    if (number.exponent >= 0)
-        return sign + digits +
-               std::string(is_zero ? 0 : static_cast<std::size_t>(number.exponent), '0');
     auto const decimals = static_cast<std::size_t>(-number.exponent);
     if (digits.size() <= decimals) digits.insert(0, decimals + 1 - digits.size(), '0');
     return sign + digits.insert(digits.size() - decimals, ".");
+}
+
+std::string written(Decimal number, int widest, PowerOfTen style) {
+    int const lead = leading_place(number);
+    bool const plain = number.significand == 0 || (lead < widest && lead >= -4);
+    if (plain) return written_plainly(number);
+    number.exponent -= lead;
+    return written_plainly(number) + exponent_text(lead, style);
 }
 
 } // namespace core::text

@@ -50,6 +50,9 @@ Decimal without_trailing_zeros(Decimal number);
 /// The exponent of the leading digit: 2 for 298.15.
 int leading_place(Decimal number);
 
+/// Writes all digits of the significand without a power of ten: `298.150`.
+std::string written_plainly(Decimal number);
+
 enum class PowerOfTen { ascii, superscript };
 
 /// Writes all digits of the significand, trailing zeros too: `298.150`, `1.5e-7`, `1.5×10⁻⁷`.

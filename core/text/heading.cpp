@@ -6,6 +6,7 @@
 #include "core/failure.h"
 #include "core/quantities.h"
 #include "core/text/characters.h"
+#include "core/text/known_units.h"
 #include "core/text/unit.h"
 #include "core/text/unit_expression.h"
 #include "core/text/unit_refusals.h"
@@ -195,6 +196,7 @@ Heading read(Parts const& split) {
 } // namespace
 
 Heading read_heading(std::string_view text) {
+    if (Unit const* known = find_known_unit(text)) return {{}, text, *known, {}};
     if (text.size() > longest)
         refuse_unfit(shown(text), "a heading of no more than 256 bytes", "shorten the heading");
     if (auto const split = at_solidus(text)) return read(*split);

@@ -13,6 +13,7 @@
 #include "core/failure.h"
 #include "core/text/characters.h"
 #include "core/text/decimal.h"
+#include "core/text/known_units.h"
 #include "core/text/number.h"
 #include "core/text/unit_expression.h"
 
@@ -158,6 +159,13 @@ void Reader::spread_behind_unit() {
 }
 
 bool Reader::unit(Quantity& result) {
+    std::string_view const rest = at_.rest();
+    if (Unit const* known = find_known_unit(rest)) {
+        result.unit = *known;
+        result.written_unit = rest;
+        at_.pass_rest();
+        return true;
+    }
     if (!UnitExpression::starts(at_)) return false;
     const char* const start = at_.position();
     UnitExpression(at_, note_).read(result.unit);

@@ -25,12 +25,14 @@ std::optional<Decimal> exact_decimal(long double number, double si, Read&& read)
     return {};
 }
 
-Unit kelvin_of(Unit unit) {
-    unit.numerator = unit.denominator = unit.zero_denominator = 1;
-    unit.zero_numerator = 0;
-    unit.reading = Reading::plain;
-    return unit;
+/// What stands in place of digits; null for a finite number.
+const char* word_for(long double number) {
+    if (std::isnan(number)) return "not a number";
+    if (std::isinf(number)) return number < 0 ? "-infinite" : "infinite";
+    return nullptr;
 }
+
+bool states_spread(double u) { return u > 0 && std::isfinite(u); }
 
 Unit as_span(Unit unit) {
     unit.zero_numerator = 0;
@@ -56,52 +58,70 @@ Decimal exact_span(double u, Unit const& unit) {
     return found ? *found : shortest_decimal(u);
 }
 
-/// The digits of both numbers in one power of ten: `(1.234×10⁻⁷ ± 0.012×10⁻⁷)`.
+/// `25 °C ± 0.5 K`: behind a value that has its unit, the uncertainty in the SI unit.
+std::string with_si_spread(std::string text, double u, Dimension dimension) {
+    if (!states_spread(u)) return text;
+    return text + " ± " + with_unit(written_exactly(shortest_decimal(u)), si_unit(dimension));
+}
+
+std::string for_people(Decimal number) {
+    return written(number, widest_for_people, PowerOfTen::superscript);
+}
+
+/// Both numbers in one power of ten: `(1.234×10⁻⁷ ± 0.012×10⁻⁷)`.
+std::string in_one_power_of_ten(Decimal value, Decimal spread, std::string_view unit_text) {
+    int const lead = std::max(leading_place(value), leading_place(spread));
+    bool const plain = lead < widest_for_people && lead >= -4;
+    std::string const power =
+        plain ? "" : written({1, lead, false}, 0, PowerOfTen::superscript).substr(1);
+    auto const scaled = [&](Decimal number) {
+        if (!plain) number.exponent -= lead;
+        return written_plainly(number) + power;
+    };
+    return with_spread(scaled(value), scaled(spread), unit_text);
+}
+
 std::string rounded_with_spread(long double value, long double u, std::string_view unit_text) {
     constexpr int most_digits = 17;
-    Decimal spread = rounded_to_digits(u, 2);
-    int const coarsest =
-        value == 0 ? spread.exponent : leading_place(rounded_to_digits(value, 2)) - most_digits + 1;
-    int const place = std::max(spread.exponent, coarsest);
-    if (place != spread.exponent) spread = rounded_to_place(u, place);
-    Decimal const rounded = rounded_to_place(value, place);
-    int const lead = std::max(leading_place(rounded), leading_place(spread));
-    if (lead < widest_for_people && lead >= -4)
-        return with_spread(written(rounded, widest_for_people), written(spread, widest_for_people),
-                           unit_text);
-    auto const scaled = [&](Decimal number) {
-        number.exponent -= lead;
-        return written(number, widest_for_people);
-    };
-    std::string const power = written({1, lead, false}, 0, PowerOfTen::superscript).substr(1);
-    return with_spread(scaled(rounded) + power, scaled(spread) + power, unit_text);
+    Decimal const spread = rounded_to_digits(u, 2);
+    Decimal const most = rounded_to_digits(value, most_digits);
+    if (value != 0 && most.exponent > spread.exponent) // all digits of the value are sure
+        return with_spread(for_people(without_trailing_zeros(most)), for_people(spread), unit_text);
+    return in_one_power_of_ten(rounded_to_place(value, spread.exponent), spread, unit_text);
 }
 
 } // namespace
 
 std::string write_number(long double value, int digits) {
+    if (const char* const word = word_for(value)) return word;
     Decimal const rounded = rounded_to_digits(value, std::clamp(digits, 1, 19));
     return written(without_trailing_zeros(rounded), widest_exactly);
 }
 
 std::string write_exactly(double si, double u, Unit const& unit, std::string_view unit_text) {
+    if (const char* const word = word_for(si)) return with_unit(word, unit_text);
     auto const number =
         exact_decimal(decimal_from_si(si, unit), si, [&](Decimal d) { return in_si(d, unit); });
     // Near 0 K a number in °C has no digits left for the value: only kelvins can say it.
-    if (!number) return write_exactly(si, u, kelvin_of(unit), si_unit(unit.dimension));
+    if (!number) {
+        std::string const value = written_exactly(shortest_decimal(si));
+        return with_si_spread(with_unit(value, si_unit(unit.dimension)), u, unit.dimension);
+    }
     std::string const value = written_exactly(*number);
-    if (u == 0) return with_unit(value, unit_text);
     if (unit.reading == Reading::point)
-        return with_unit(value, unit_text) + " ± " + written_exactly(shortest_decimal(u)) + " K";
+        return with_si_spread(with_unit(value, unit_text), u, unit.dimension);
+    if (!states_spread(u)) return with_unit(value, unit_text);
     return with_spread(value, written_exactly(exact_span(u, unit)), unit_text);
 }
 
 std::string write_for_people(double si, double u, Unit const& unit, std::string_view unit_text,
                              int digits) {
     long double const value = decimal_from_si(si, unit);
-    if (u > 0) return rounded_with_spread(value, decimal_from_si(u, as_span(unit)), unit_text);
+    if (const char* const word = word_for(value)) return with_unit(word, unit_text);
+    if (states_spread(u))
+        return rounded_with_spread(value, decimal_from_si(u, as_span(unit)), unit_text);
     Decimal const rounded = rounded_to_digits(value, std::clamp(digits, 1, 19));
-    return with_unit(written(rounded, widest_for_people, PowerOfTen::superscript), unit_text);
+    return with_unit(for_people(rounded), unit_text);
 }
 
 } // namespace core::text

@@ -3,6 +3,7 @@
 
 #include "core/failure.h"
 #include "core/text/characters.h"
+#include "core/text/known_units.h"
 #include "core/text/unit_expression.h"
 
 namespace core::text {
@@ -19,6 +20,7 @@ void refuse_empty_or_long(std::string_view text, bool blank) {
 } // namespace
 
 Unit read_unit(std::string_view text, std::string& note) {
+    if (Unit const* known = find_known_unit(text)) return *known;
     refuse_empty_or_long(text, false);
     Cursor at(text);
     at.skip_spaces();

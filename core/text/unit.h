@@ -26,8 +26,11 @@ struct Unit {
     Reading reading = Reading::plain;
     Share share = Share::none;
 
+    /// Whether numbers in this unit are SI values as they stand.
+    bool is_coherent() const { return numerator == denominator && zero_numerator == 0; }
     double to_si(double number) const;
-    double from_si(double si) const { return static_cast<double>(exactly_from_si(si)); }
+    double from_si(double si) const;
+    /// For writing: more places than a double has.
     long double exactly_from_si(double si) const;
     /// A difference or an uncertainty: without the zero point.
     double span_to_si(double number) const;

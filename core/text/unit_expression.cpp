@@ -72,8 +72,9 @@ std::string_view rest_from(Cursor const& at) {
     return whole.substr(static_cast<std::size_t>(at.position() - whole.data()));
 }
 
-Cursor after_one(Cursor at) {
+Cursor after_sign(Cursor at) {
     at.advance();
+    at.skip_spaces();
     return at;
 }
 
@@ -268,7 +269,7 @@ Symbol UnitExpression::symbol_with_digits(const char* start, const char* base_en
     FoldedName base = name;
     base.drop(digits.size());
     Symbol const found = digits.empty() ? Symbol{} : find_symbol(base.view());
-    if (!found && find_refused_name(name.view()) != nullptr)
+    if (!found && !digits.empty() && find_refused_name(name.view()) != nullptr)
         refuse_name(at_.whole(), {start, static_cast<std::size_t>(at_.position() - start)},
                     name.view());
     if (!digits.empty()) power = 0;
@@ -404,10 +405,10 @@ void refuse_rest(Cursor const& at) {
     std::string const needed = "a unit such as `kJ/(kg·K)`";
     if (at.at_end()) refuse_unfit(shown(whole), needed + " to the end", std::string(good_form));
     std::string_view const rest = rest_from(at);
-    if (*at == U'-' && UnitExpression::starts(after_one(at)))
+    if (*at == U'-' && UnitExpression::starts(after_sign(at)))
         refuse_unfit(shown(whole), needed + "; a hyphen does not multiply",
                      write_instead(std::string(whole.data(), at.position()) + "·" +
-                                   std::string(rest_from(after_one(at)))));
+                                   std::string(rest_from(after_sign(at)))));
     if (UnitExpression::starts(at))
         refuse_unfit(
             shown(whole), needed + "; a sign of multiplication is missing",

@@ -58,6 +58,11 @@ public:
     /// Reads a unit with the mark of a pressure behind it, and stops at what no unit goes on with.
     /// `unit` is made in place: copying long doubles that were just stored costs more than reading.
     void read(Unit& unit);
+    Unit read() {
+        Unit unit;
+        read(unit);
+        return unit;
+    }
 
     /// Whether a unit can begin here.
     static bool starts(Cursor const& at);

@@ -30,7 +30,8 @@ std::vector<double> ramp(double from, double step) {
 }
 
 const std::vector<double> heats = ramp(1e4, 0.1), temperatures = ramp(300, 0.01),
-                          ends = ramp(600, 0.01);
+                          ends = ramp(600, 0.01), pressures = ramp(1e5, 1),
+                          end_pressures = ramp(5e5, 3);
 
 double raw_fusion(double heat, double temperature) { return heat / temperature; }
 double raw_gas(double cp, double T1, double p1, double T2, double p2) {
@@ -51,14 +52,16 @@ void typed_fusion_rows(benchmark::State& state) {
 void raw_gas_rows(benchmark::State& state) {
     for (auto _ : state)
         for (std::size_t i = 0; i < rows; ++i)
-            benchmark::DoNotOptimize(raw_gas(29.1, temperatures[i], 1e5, ends[i], 5e5));
+            benchmark::DoNotOptimize(
+                raw_gas(29.1, temperatures[i], pressures[i], ends[i], end_pressures[i]));
 }
 void typed_gas_rows(benchmark::State& state) {
     for (auto _ : state)
         for (std::size_t i = 0; i < rows; ++i)
             benchmark::DoNotOptimize(processes::entropy_of_gas(
                 {MolarEntropy::from_value(29.1)}, Temperature::kelvin(temperatures[i]),
-                {1e5 * si::pascal}, Temperature::kelvin(ends[i]), {5e5 * si::pascal}));
+                {Pressure::from_value(pressures[i])}, Temperature::kelvin(ends[i]),
+                {Pressure::from_value(end_pressures[i])}));
 }
 
 void read_text(benchmark::State& state) {
