@@ -148,10 +148,8 @@ void Reader::refuse_percent_of_both() const {
 void Reader::spread_behind_unit() {
     spread_.number = number_of_spread();
     spread_.kind = Spread::Kind::in_own_unit;
-    Cursor ahead = at_;
-    if (ahead.take(U'%')) {
+    if (at_.take(U'%')) {
         spread_.kind = Spread::Kind::relative;
-        at_ = ahead;
     } else if (UnitExpression::starts(at_)) {
         UnitExpression(at_, note_).read(spread_.unit);
         spread_.kind = Spread::Kind::in_unit;

@@ -67,11 +67,6 @@ bool take_join(Cursor& at) {
 
 bool goes_on(Cursor at) { return take_join(at); }
 
-std::string_view rest_from(Cursor const& at) {
-    std::string_view const whole = at.whole();
-    return whole.substr(static_cast<std::size_t>(at.position() - whole.data()));
-}
-
 Cursor after_sign(Cursor at) {
     at.advance();
     at.skip_spaces();
@@ -404,11 +399,11 @@ void refuse_rest(Cursor const& at) {
     std::string_view const whole = at.whole();
     std::string const needed = "a unit such as `kJ/(kg·K)`";
     if (at.at_end()) refuse_unfit(shown(whole), needed + " to the end", std::string(good_form));
-    std::string_view const rest = rest_from(at);
+    std::string_view const rest = at.rest();
     if (*at == U'-' && UnitExpression::starts(after_sign(at)))
         refuse_unfit(shown(whole), needed + "; a hyphen does not multiply",
                      write_instead(std::string(whole.data(), at.position()) + "·" +
-                                   std::string(rest_from(after_sign(at)))));
+                                   std::string(after_sign(at).rest())));
     if (UnitExpression::starts(at))
         refuse_unfit(
             shown(whole), needed + "; a sign of multiplication is missing",

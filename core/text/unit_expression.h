@@ -50,6 +50,7 @@ private:
     std::size_t size_ = 0;
 };
 
+/// The parser: one function a rule of the grammar above.
 class UnitExpression {
 public:
     /// Reads from the cursor on; what is mended is said in `note`.
