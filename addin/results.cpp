@@ -20,8 +20,8 @@ OUString to_office(std::string const& text) {
 /// One cell of an answer. A blank row of the input is an empty text, since an array has no blanks.
 Any cell(Answer const& answer, std::size_t at) {
     if (std::ranges::binary_search(answer.blanks, at)) return Any(OUString());
-    for (Answer::Error const& error : answer.errors)
-        if (error.cell == at) return Any(error.number);
+    const auto error = std::ranges::lower_bound(answer.errors, at, {}, &Answer::Error::cell);
+    if (error != answer.errors.end() && error->cell == at) return Any(error->number);
     if (answer.kind == Answer::Kind::numbers) return Any(answer.numbers[at]);
     return Any(to_office(answer.texts[at]));
 }

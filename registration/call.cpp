@@ -179,18 +179,19 @@ private:
         const bool one = evaluation_.rows() == 1;
         const core::Notes notes = one ? core::Notes(&noted, &remarks) : core::Notes();
         const Results results = evaluation_.results(notes, true);
+        const Results per_amount = evaluation_.results_without_amount(core::silent, false);
         Answer answer = shaped(results.count(), Answer::Kind::texts);
         for (std::size_t row = 0; row < answer.texts.size(); ++row)
-            if (!evaluation_.blank(row)) answer.texts[row] = prose(results, row, noted, remarks);
+            if (!evaluation_.blank(row))
+                answer.texts[row] = prose(results, per_amount, row, noted, remarks);
         return spread(std::move(answer));
     }
 
-    std::string prose(Results const& results, std::size_t row,
+    std::string prose(Results const& results, Results const& per_amount, std::size_t row,
                       std::vector<std::string> const& noted, std::vector<std::string>& remarks) {
         if (show_.view == View::source) return source(evaluation_);
-        if (show_.view == View::steps) return steps(evaluation_, results, row, noted);
-        for (RowFault const& fault : results.faults)
-            if (fault.row == row) return why(entry_, fault.failure);
+        if (show_.view == View::steps) return steps(evaluation_, results, per_amount, row, noted);
+        if (Failure const* fault = results.fault(row)) return why(entry_, *fault);
         std::vector<std::string> all = remarks;
         for (Given const& given : evaluation_.arguments().inputs)
             if (Numbers const* numbers = given.missing() ? nullptr : given.if_numbers())

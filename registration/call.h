@@ -28,7 +28,7 @@ struct Answer {
         std::size_t cell;
         double number;
     };
-    std::vector<Error> errors;
+    std::vector<Error> errors; ///< rising by cell
 };
 
 /// Calls a catalogued function as a worksheet does. There are as many blocks as the entry has

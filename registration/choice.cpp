@@ -23,20 +23,30 @@ bool fits(Overload const& overload, std::span<const Given> inputs) {
     return true;
 }
 
+/// How far an argument is from what an overload takes: of the right dimension but read otherwise,
+/// of another kind, or one too many, which can only be left out.
+std::size_t distance(Overload const& overload, std::span<const Given> inputs, std::size_t input) {
+    if (fits(overload, inputs, input)) return 0;
+    if (input >= overload.needs.size()) return 4;
+    Numbers const* numbers = inputs[input].missing() ? nullptr : inputs[input].if_numbers();
+    return numbers && !numbers->bare && numbers->dimension == overload.needs[input].dimension ? 1
+                                                                                              : 2;
+}
+
 struct Misfits {
-    std::size_t count = 0, first = 0; ///< one too many counts double: it can only be left out
+    std::size_t distance = 0, first = 0;
 };
 Misfits misfits(Overload const& overload, std::span<const Given> inputs) {
     Misfits found;
     for (std::size_t input = inputs.size(); input-- > 0;)
-        if (!fits(overload, inputs, input))
-            found = {found.count + (input < overload.needs.size() ? 1u : 2u), input};
+        if (const std::size_t far = distance(overload, inputs, input))
+            found = {found.distance + far, input};
     return found;
 }
 
-/// Fewer misfits; among equals the earlier arguments are taken at their word.
+/// Nearer; among equals the earlier arguments are taken at their word.
 bool better(Misfits a, Misfits b) {
-    return a.count != b.count ? a.count < b.count : a.first > b.first;
+    return a.distance != b.distance ? a.distance < b.distance : a.first > b.first;
 }
 
 std::string joined(std::vector<std::string> const& words) {
@@ -88,7 +98,8 @@ std::optional<Failure> unreadable(Entry const& entry, std::span<const Given> inp
     for (Form const& form : entry.all_forms())
         for (Overload const& overload : form.overloads) {
             const Misfits found = misfits(overload, inputs);
-            if (found.count != fewest.count || found.first != at || at >= overload.needs.size())
+            if (found.distance != fewest.distance || found.first != at ||
+                at >= overload.needs.size())
                 continue;
             const std::string text = described(overload.needs[at]);
             if (std::ranges::find(needs, text) == needs.end()) needs.push_back(text);

@@ -298,6 +298,14 @@ void Evaluation::multiply(Results& results) const {
 }
 
 Results Evaluation::results(core::Notes const& notes, bool explain) const {
+    Results results = results_without_amount(notes, explain);
+    if (!arguments_.amount.missing()) multiply(results);
+    std::ranges::sort(results.faults, {}, &RowFault::row);
+    std::ranges::sort(results.failures_in_texts, {}, &Results::FailedText::row);
+    return results;
+}
+
+Results Evaluation::results_without_amount(core::Notes const& notes, bool explain) const {
     Results results(outcome_, rows_, explain);
     const auto run = overload().run;
     if (states_.empty()) {
@@ -311,7 +319,6 @@ Results Evaluation::results(core::Notes const& notes, bool explain) const {
         }
         for (RowFault const& fault : faults_) results.fail(fault.row, fault.failure);
     }
-    if (!arguments_.amount.missing()) multiply(results);
     return results;
 }
 

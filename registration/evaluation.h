@@ -29,6 +29,8 @@ public:
     Evaluation(Entry const&, Arguments&);
 
     Results results(core::Notes const&, bool explain) const;
+    /// The same before the amount multiplies it.
+    Results results_without_amount(core::Notes const&, bool explain) const;
 
     /// Combined standard uncertainty of each row by JCGM 100:2008, 5.1.3 note 2: each input moved
     /// by plus and minus its own, half the difference, root sum of squares, inputs independent.

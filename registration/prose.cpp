@@ -126,8 +126,8 @@ std::string result_text(Results const& results, std::size_t row, Outcome outcome
 
 } // namespace
 
-std::string steps(Evaluation const& evaluation, Results const& results, std::size_t row,
-                  std::vector<std::string> const& noted) {
+std::string steps(Evaluation const& evaluation, Results const& results, Results const& per_amount,
+                  std::size_t row, std::vector<std::string> const& noted) {
     Entry const& entry = evaluation.entry();
     const std::string_view formula = evaluation.form().formula;
     std::string text =
@@ -158,6 +158,8 @@ std::string steps(Evaluation const& evaluation, Results const& results, std::siz
     const std::string_view symbol = result_symbol(formula);
     if (!whole) text += substituted(formula, symbols) + "\n";
     if (Given const& amount = evaluation.arguments().amount; !amount.missing()) {
+        text += std::string(symbol) + " = " +
+                result_text(per_amount, row, evaluation.overload().outcome) + "\n";
         text += std::string("n = ") + as_read(amount, row) + "\n";
         if (const auto molar_mass = evaluation.molar_mass(row))
             text += "M = " + in_si(*molar_mass, core::dimension<core::MolarMass>) + "\n";

@@ -11,7 +11,7 @@ namespace registration {
 
 /// The derivation of one row: formula in symbols, each input as read and in SI, what the function
 /// tells on its way, substitution, result.
-std::string steps(Evaluation const&, Results const&, std::size_t row,
+std::string steps(Evaluation const&, Results const&, Results const& per_amount, std::size_t row,
                   std::vector<std::string> const& noted);
 
 /// Where the relation and the figures come from, and where it holds.

@@ -4,9 +4,10 @@
 #include "core/failure.h"
 #include "registration/numbers.h"
 
-#include <bit>
 #include <boost/container/small_vector.hpp>
 
+#include <algorithm>
+#include <bit>
 #include <cstdint>
 #include <string>
 #include <vector>
@@ -63,9 +64,7 @@ public:
     }
     bool failed(std::size_t row) const {
         if (outcome.kind == Outcome::Kind::number) return numbers[row] != numbers[row];
-        for (auto const& failure : failures_in_texts)
-            if (failure.row == row) return true;
-        return false;
+        return std::ranges::binary_search(failures_in_texts, row, {}, &FailedText::row);
     }
 
     struct FailedText {
@@ -78,6 +77,12 @@ public:
     std::vector<std::string> texts;
     std::vector<FailedText> failures_in_texts;
     std::vector<RowFault> faults; ///< filled only where the reasons were asked for
+
+    /// Why a row failed, or null; once the results are complete, faults rise by row.
+    core::Failure const* fault(std::size_t row) const {
+        const auto found = std::ranges::lower_bound(faults, row, {}, &RowFault::row);
+        return found != faults.end() && found->row == row ? &found->failure : nullptr;
+    }
 
 private:
     void overflow(std::size_t row) {
