@@ -23,6 +23,7 @@ using Range = Sequence<Sequence<Element>>;
 
 template<class Element>
 Range<Element> const* as_range(Any const& value) {
+    if (value.getValueTypeClass() != css::uno::TypeClass_SEQUENCE) return nullptr;
     if (value.getValueType() != cppu::UnoType<Range<Element>>::get()) return nullptr;
     return static_cast<Range<Element> const*>(value.getValue());
 }

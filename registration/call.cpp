@@ -82,7 +82,8 @@ Target target_of(Evaluation const& evaluation, Show const& show) {
     const Outcome outcome = evaluation.outcome();
     Target target;
     target.unit.dimension = outcome.dimension;
-    if (outcome.kind == Outcome::Kind::number && outcome.dimension != core::Dimension{}) {
+    const bool named = show.view != View::number && outcome.kind == Outcome::Kind::number;
+    if (named && outcome.dimension != core::Dimension{}) {
         target.text = core::text::si_unit(outcome.dimension);
         if (outcome.reading == Reading::difference) target.text = "Δ" + target.text;
         if (outcome.reading == Reading::gauge) target.text += "(g)";

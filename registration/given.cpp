@@ -10,7 +10,7 @@ void Given::read() const {
     if (asked_) return;
     asked_ = true;
     try {
-        numbers_ = read_numbers(block_);
+        read_numbers(block_, numbers_);
     } catch (core::Failure& failure) {
         unreadable_ = std::move(failure);
     }

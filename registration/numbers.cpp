@@ -331,13 +331,12 @@ void fill_headed(Form const& form, Filling& filling) {
 
 } // namespace
 
-Numbers read_numbers(Block block) {
+void read_numbers(Block block, Numbers& numbers) {
     if (block.single() && is_number(block.at(0, 0)) && block.at(0, 0).number == 0)
         core::refuse_unfit(
             "a blank cell, or the bare number 0", "a value that is seen to be meant",
             "fill the cell, or write a zero that is meant as the text \"0\" or with its unit");
     const Form form = recognise(block);
-    Numbers numbers;
     numbers.across = form.grid.across && form.count() > 1;
     numbers.listed = form.count() > 1;
     Filling filling(numbers, form.count());
@@ -356,7 +355,6 @@ Numbers read_numbers(Block block) {
         fill_headed(form, filling);
         break;
     }
-    return numbers;
 }
 
 std::string_view written_unit(Block block, std::size_t row) {

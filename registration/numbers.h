@@ -46,8 +46,8 @@ struct Numbers {
 
 /// Reads a block in any of the forms of the cell language: text, value | unit (| u), unit over
 /// value, headed column (and u), rows of value | unit (| u), texts, plain numbers; the same across.
-/// Throws Failure (unfit) where the block as a whole cannot be read.
-Numbers read_numbers(Block);
+/// Fills fresh Numbers; throws Failure (unfit) where the block as a whole cannot be read.
+void read_numbers(Block, Numbers&);
 
 /// How the quantity in a row stands in the sheet, `7.3 kJ/mol` (u left to the caller).
 std::string written(Block, std::size_t row);
