@@ -1,12 +1,15 @@
 // SPDX-License-Identifier: MPL-2.0
 #include "addin/arguments.h"
 
+#include "core/failure.h"
+
 #include <com/sun/star/uno/Sequence.hxx>
 #include <cppu/unotype.hxx>
 #include <rtl/ustring.hxx>
 
+#include <algorithm>
 #include <cstdint>
-#include <stdexcept>
+#include <string>
 
 namespace addin {
 namespace {
@@ -15,49 +18,71 @@ using css::uno::Any, css::uno::Sequence;
 using registration::Block, registration::Cell;
 using rtl::OUString;
 
-constexpr std::size_t most_cells = 1'048'576;
+constexpr std::size_t most_cells = 1'048'576; // the rows of a sheet
 constexpr sal_Int32 most_characters = 32'767;
 
 template<class Element>
 using Range = Sequence<Sequence<Element>>;
 
-template<class Element>
-Range<Element> const* as_range(Any const& value) {
-    if (value.getValueTypeClass() != css::uno::TypeClass_SEQUENCE) return nullptr;
-    if (value.getValueType() != cppu::UnoType<Range<Element>>::get()) return nullptr;
-    return static_cast<Range<Element> const*>(value.getValue());
+/// Hands a value to `use` as the range it is, or as it stands. Only a sequence has its type looked
+/// at closely, which costs more than reading a single value.
+template<class Use>
+void as_what_it_is(Any const& value, Use use) {
+    if (value.getValueTypeClass() == css::uno::TypeClass_SEQUENCE) {
+        const css::uno::Type type = value.getValueType();
+        if (type == cppu::UnoType<Range<Any>>::get())
+            return use(*static_cast<Range<Any> const*>(value.getValue()));
+        if (type == cppu::UnoType<Range<double>>::get())
+            return use(*static_cast<Range<double> const*>(value.getValue()));
+        if (type == cppu::UnoType<Range<OUString>>::get())
+            return use(*static_cast<Range<OUString> const*>(value.getValue()));
+    }
+    use(value);
+}
+
+/// No reader takes a text this long: what is cut off changes nothing but the cost of refusing it.
+sal_Int32 bounded_length(OUString const& text) {
+    return std::min(text.getLength(), most_characters);
+}
+
+[[noreturn]] void refuse_cells() {
+    core::refuse_unfit("a range of more than " + std::to_string(most_cells) + " cells",
+                       "at most as many cells as a sheet has rows",
+                       "give only the rows that hold values");
+}
+
+[[noreturn]] void refuse_shape() {
+    core::refuse_unfit("rows of unequal length", "a rectangle of cells", "give a range of cells");
 }
 
 /// What a call needs room for, so that nothing moves while blocks point into it.
 struct Room {
     std::size_t cells = 0, bytes = 0;
 
-    void text(OUString const& text) {
-        if (text.getLength() > most_characters) throw std::length_error("text");
-        bytes += 3 * static_cast<std::size_t>(text.getLength()); // UTF-16 unit to UTF-8, at most
+    void add(OUString const& text) {
+        bytes += 3 * static_cast<std::size_t>(bounded_length(text)); // of a UTF-16 unit, at most
     }
-    void add(OUString const& value) { text(value); }
     void add(double) {}
     void add(Any const& value) {
         if (value.getValueTypeClass() == css::uno::TypeClass_STRING)
-            text(*static_cast<OUString const*>(value.getValue()));
+            add(*static_cast<OUString const*>(value.getValue()));
+    }
+
+    void operator()(Any const& value) {
+        ++cells;
+        add(value);
     }
     template<class Element>
-    void range(Range<Element> const& rows) {
-        std::size_t count = 0;
+    void operator()(Range<Element> const& rows) {
+        const sal_Int32 columns = rows.hasElements() ? rows[0].getLength() : 0;
+        const auto count =
+            static_cast<std::size_t>(rows.getLength()) * static_cast<std::size_t>(columns);
+        if (count > most_cells) refuse_cells();
         for (Sequence<Element> const& row : rows) {
-            count += static_cast<std::size_t>(row.getLength());
-            if (count > most_cells) throw std::length_error("cells");
+            if (row.getLength() != columns) refuse_shape();
             for (Element const& element : row) add(element);
         }
         cells += count;
-    }
-    void argument(Any const& value) {
-        if (auto const* anys = as_range<Any>(value)) return range(*anys);
-        if (auto const* numbers = as_range<double>(value)) return range(*numbers);
-        if (auto const* texts = as_range<OUString>(value)) return range(*texts);
-        ++cells;
-        add(value);
     }
 };
 
@@ -66,7 +91,7 @@ bool is_space(char c) { return c == ' ' || c == '\t' || c == '\n' || c == '\r'; 
 /// UTF-16 to UTF-8; a lone surrogate becomes the replacement character.
 char* encode(OUString const& text, char* to) {
     const sal_Unicode* from = text.getStr();
-    const sal_Unicode* const end = from + text.getLength();
+    const sal_Unicode* const end = from + bounded_length(text);
     const auto put = [&to](std::uint32_t byte) { *to++ = static_cast<char>(byte); };
     while (from != end) {
         std::uint32_t c = *from++;
@@ -97,17 +122,26 @@ char* encode(OUString const& text, char* to) {
 
 Arguments::Arguments(std::initializer_list<Any const*> values) {
     Room room;
-    for (Any const* value : values) room.argument(*value);
+    int position = 0;
+    try {
+        for (Any const* value : values) {
+            as_what_it_is(*value, [&room](auto const& what) { room(what); });
+            ++position;
+        }
+    } catch (core::Failure& failure) {
+        failure.argument = position;
+        throw;
+    }
     cells_.reserve(room.cells);
     characters_.reserve(room.bytes);
-    for (Any const* value : values) add(*value);
+    for (Any const* value : values) as_what_it_is(*value, [this](auto const& what) { add(what); });
 }
 
 Cell Arguments::cell(double number) { return {Cell::Kind::number, number, {}}; }
 
 Cell Arguments::cell(OUString const& text) {
     const std::size_t start = characters_.size();
-    characters_.resize(start + 3 * static_cast<std::size_t>(text.getLength()),
+    characters_.resize(start + 3 * static_cast<std::size_t>(bounded_length(text)),
                        boost::container::default_init);
     char* const begin = characters_.data() + start;
     const char* end = encode(text, begin);
@@ -136,24 +170,18 @@ Cell Arguments::cell(Any const& value) {
 }
 
 template<class Element>
-void Arguments::add_range(Any const& value) {
-    Range<Element> const& rows = *static_cast<Range<Element> const*>(value.getValue());
+void Arguments::add(Range<Element> const& rows) {
     const auto row_count = static_cast<std::size_t>(rows.getLength());
-    const std::size_t columns = row_count ? static_cast<std::size_t>(rows[0].getLength()) : 0;
+    const std::size_t columns =
+        rows.hasElements() ? static_cast<std::size_t>(rows[0].getLength()) : 0;
     Cell const* const start = cells_.data() + cells_.size();
-    for (Sequence<Element> const& row : rows) {
-        if (static_cast<std::size_t>(row.getLength()) != columns)
-            throw std::length_error("ragged range");
+    for (Sequence<Element> const& row : rows)
         for (Element const& element : row) cells_.push_back(cell(element));
-    }
     blocks_.push_back(columns ? Block{start, row_count, columns} : Block{});
 }
 
 void Arguments::add(Any const& value) {
     if (!value.hasValue()) return blocks_.push_back(Block{});
-    if (as_range<Any>(value)) return add_range<Any>(value);
-    if (as_range<double>(value)) return add_range<double>(value);
-    if (as_range<OUString>(value)) return add_range<OUString>(value);
     cells_.push_back(cell(value));
     blocks_.push_back({&cells_.back(), 1, 1});
 }

@@ -8,10 +8,9 @@ pgrep -x soffice.bin -u "$(id -u)" >/dev/null && fail "An office is running. Clo
 say "[1/3] Packages"
 need "${build_packages[@]}"
 say "[2/3] Building the package (a minute or two the first time)"
-mkdir -p "$project/build"
-build "$project/build/install-build" -- package_oxt >"$project/build/install-build.out" 2>&1 || { cat "$project/build/install-build.out" >&2; exit 1; }
+build "$project/build/package" -DBUILD_TESTING=OFF
 say "[3/3] Installing"
 shared=()
 [ "$(id -u)" -eq 0 ] && shared=(--shared) # root has no office of its own: for all users
-unopkg add "${shared[@]}" -f -v "$project"/build/install-build/entropy-cells-*.oxt >"$project/build/install.log" 2>&1 || { cat "$project/build/install.log" >&2; fail "The package could not be installed."; }
+unopkg add "${shared[@]}" -f -v "$project"/build/package/entropy-cells-*.oxt >"$project/build/package/install.log" 2>&1 || { cat "$project/build/package/install.log" >&2; fail "The package could not be installed."; }
 say "Done. Open Calc and write  =ADDIN.SELFTEST()  into a cell."

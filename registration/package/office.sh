@@ -19,21 +19,19 @@ need() {
   say "    installing ${missing[*]}"
   export DEBIAN_FRONTEND=noninteractive
   apt-get update -qq >/dev/null || fail "apt-get update failed"
-  apt-get install -y -qq --no-install-recommends "${missing[@]}" >/dev/null || fail "apt-get install failed"
+  apt-get install -y -qq --no-install-recommends "${missing[@]}" >/dev/null 2>&1 || fail "apt-get install failed"
 }
 
 build_packages=(g++ cmake ninja-build pkg-config libboost-dev libpugixml-dev libreoffice-calc libreoffice-dev)
 test_packages=(libgtest-dev librapidcheck-dev libbenchmark-dev units)
 
-# build FOLDER CMAKE-ARGUMENT... [-- TARGET...]
+# build FOLDER CMAKE-ARGUMENT...: configures and builds, with a line of progress a step.
 build() {
-  local folder=$1 options=() targets=()
+  local folder=$1
   shift
-  while [ $# -gt 0 ] && [ "$1" != "--" ]; do options+=("$1"); shift; done
-  [ $# -gt 0 ] && shift
-  for target in "$@"; do targets+=(--target "$target"); done
-  cmake -S "$project" -B "$folder" -G Ninja "${options[@]}" >"$folder.log" 2>&1 || { cat "$folder.log" >&2; fail "The configuration failed."; }
-  cmake --build "$folder" "${targets[@]}" || fail "The build failed."
+  mkdir -p "$folder"
+  cmake -S "$project" -B "$folder" -G Ninja "$@" >"$folder/configure.log" 2>&1 || { cat "$folder/configure.log" >&2; fail "The configuration failed."; }
+  NINJA_STATUS="    [%f/%t] " cmake --build "$folder" >&2 || fail "The build failed."
 }
 
 # A folder of this run's own, gone when the script ends.
@@ -53,5 +51,5 @@ office() { timeout 300 soffice --headless --norestore "${profile[@]}" "$@" >"$wo
 
 # Text of a sheet: tab between cells, values in full or as shown.
 full_text='csv:Text - txt - csv (StarCalc):9,0,76,1,,0,false,false,false,false'
-shown_text='csv:Text - txt - csv (StarCalc):9,0,76,1,,0,false,true,false,false'
+shown_text='csv:Text - txt - csv (StarCalc):9,0,76,1,,0,false,true,true,false'
 quoted_csv='csv:Text - txt - csv (StarCalc):44,34,76,1,,0,false,true,false,false'

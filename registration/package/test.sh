@@ -5,7 +5,6 @@
 set -euo pipefail
 source "$(dirname "${BASH_SOURCE[0]}")/office.sh"
 
-mkdir -p "$project/build"
 folder="${1:-$project/build/tests}"
 say "[1/3] Packages"
 need "${build_packages[@]}" "${test_packages[@]}"
