@@ -25,13 +25,19 @@ struct Place {
     std::size_t section, entry;
 };
 
+using Values = std::initializer_list<Any const*>;
+
 /// No exception may leave, whatever happens: the office would show an error without a reason.
-Any answer(Place place, std::initializer_list<Any const*> values) noexcept {
+Any answer(Place place, Values values) noexcept {
     namespace catalogue = registration::catalogue;
     try {
-        const addin::Arguments arguments(values);
-        return addin::to_office(registration::call(
-            catalogue::sections()[place.section].entries[place.entry], arguments.blocks()));
+        auto const& entry = catalogue::sections()[place.section].entries[place.entry];
+        try {
+            const addin::Arguments arguments(values);
+            return addin::to_office(registration::call(entry, arguments.blocks()));
+        } catch (core::Failure const& failure) {
+            return addin::refused(entry, values, failure);
+        }
     } catch (...) {
         return Any(registration::error_number(core::Failure::Kind::unfit));
     }

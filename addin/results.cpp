@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: MPL-2.0
 #include "addin/results.h"
 
+#include "registration/prose.h"
+
 #include <com/sun/star/uno/Sequence.hxx>
 #include <rtl/ustring.hxx>
 
@@ -15,6 +17,23 @@ using rtl::OUString;
 
 OUString to_office(std::string const& text) {
     return OUString(text.data(), static_cast<sal_Int32>(text.size()), RTL_TEXTENCODING_UTF8);
+}
+
+/// Whether `show` asks for the reason of an error.
+bool asks_why(Any const& show) {
+    OUString view;
+    return (show >>= view) && view.trim().startsWith("why");
+}
+
+/// A position in the call, counted as failures count: the inputs, then amount, then show.
+int counted(registration::Entry const& entry, std::size_t position) {
+    using Role = registration::Argument::Role;
+    const std::size_t inputs = entry.input_count();
+    if (position == entry.position(Role::amount)) return static_cast<int>(inputs);
+    if (position == entry.position(Role::show)) return static_cast<int>(inputs) + 1;
+    std::size_t input = 0;
+    while (entry.position_of_input(input) != position) ++input;
+    return static_cast<int>(input);
 }
 
 /// One cell of an answer. A blank row of the input is an empty text, since an array has no blanks.
@@ -54,6 +73,15 @@ Any to_office(Answer const& answer) {
     if (answer.rows * answer.columns == 1) return cell(answer, 0);
     if (answer.kind == Answer::Kind::numbers && answer.blanks.empty()) return numbers(answer);
     return cells(answer);
+}
+
+Any refused(registration::Entry const& entry, std::initializer_list<Any const*> values,
+            core::Failure failure) {
+    const std::size_t show = entry.position(registration::Argument::Role::show);
+    if (show == entry.argument_count() || !asks_why(*values.begin()[show]))
+        return Any(registration::error_number(failure.kind));
+    failure.argument = counted(entry, static_cast<std::size_t>(failure.argument));
+    return Any(to_office(registration::why(entry, failure)));
 }
 
 } // namespace addin
