@@ -61,9 +61,9 @@ std::string accepted(Entry const& entry, std::size_t position) {
 std::string wizard_text(Entry const& entry, std::size_t position) {
     Argument const& argument = entry.arguments[position];
     std::string text = argument.says;
-    text.append(". Takes ").append(accepted(entry, position));
     text.append(may_be_left_out(entry, position) ? ". May be left out" : ". Required");
-    return text.append(". Example: ").append(argument.example);
+    text.append("; for example ").append(argument.example);
+    return text.append(". Takes ").append(accepted(entry, position)).append(".");
 }
 
 std::string call_pattern(Entry const& entry) {

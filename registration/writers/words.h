@@ -16,8 +16,8 @@ bool may_be_left_out(Entry const&, std::size_t position);
 /// What kinds of values the argument takes: `a molar energy such as `1 J/mol` or …`.
 std::string accepted(Entry const&, std::size_t position);
 
-/// The wizard's text of an argument: what it is, how it may be given, whether it is required, an
-/// example.
+/// The wizard's text of an argument: what it is, whether it is required, an example, and last, since
+/// the wizard cuts long texts, what it takes.
 std::string wizard_text(Entry const&, std::size_t position);
 
 /// `ENTROPY.FUSION(what; temperature; [amount]; [show])`
