@@ -9,9 +9,16 @@
 #include <string>
 #include <vector>
 
-// wrong_inputs_sheet TABLE SHEET: turns the table of wrong inputs into a flat sheet. In a call, SHOW
-// stands for the show argument and BLANK for a blank cell. A row of the sheet holds the call, what it
-// gives, the error expected, the reason under "why", and the piece expected in it.
+// wrong_inputs_sheet TABLE SHEET: turns the table of wrong inputs into a flat sheet. A row of the
+// sheet holds the call, what it gives, the error expected, the reason under "why", and the piece
+// expected in it. In a call stand
+//     SHOW        the show argument
+//     SHOW[text]  the show argument where it is itself what is wrong
+//     BLANK       a blank cell
+//     BLANKS      three blank cells below one another
+//     EMPTY       a cell whose formula gives an empty text
+//     TYPED[text] a cell into which the text was typed
+//     ROWS[n]     two columns of n blank rows
 
 namespace {
 
@@ -41,6 +48,22 @@ std::string replaced(std::string text, std::string_view what, std::string_view w
     return text;
 }
 
+/// Replaces `word[text]` by what is made of the text.
+template<class Make>
+std::string replaced_bracket(std::string text, std::string const& word, Make make) {
+    for (std::size_t at = text.find(word + "["); at != std::string::npos;
+         at = text.find(word + "[", at)) {
+        const std::size_t start = at + word.size() + 1, end = text.find(']', start);
+        if (end == std::string::npos) throw std::runtime_error("no ] behind " + word);
+        const std::string made = make(text.substr(start, end - start));
+        text.replace(at, end + 1 - at, made);
+        at += made.size();
+    }
+    return text;
+}
+
+std::string quoted(std::string const& text) { return '"' + text + '"'; }
+
 pugi::xml_node cell(pugi::xml_node row) { return row.append_child("table:table-cell"); }
 void text_cell(pugi::xml_node row, std::string const& text) {
     pugi::xml_node node = cell(row);
@@ -51,15 +74,42 @@ void formula_cell(pugi::xml_node row, std::string const& formula) {
     cell(row).append_attribute("table:formula") = formula.c_str();
 }
 
-void add(pugi::xml_node table, WrongInput const& input) {
+/// What is typed into a cell of its own: F and the columns behind it, of the row.
+std::string with_cells(std::string call, std::size_t row, std::vector<std::string>& typed) {
+    call = replaced_bracket(std::move(call), "TYPED", [&](std::string const& text) {
+        typed.push_back(text);
+        return "[." + std::string(1, static_cast<char>('E' + typed.size())) + std::to_string(row) +
+               "]";
+    });
+    call = replaced_bracket(std::move(call), "ROWS",
+                            [](std::string const& rows) { return "[.AA1:.AB" + rows + "]"; });
+    call = replaced(std::move(call), "BLANKS", "[.Z1:.Z3]");
+    call = replaced(std::move(call), "BLANK", "[.Z1]");
+    return replaced(std::move(call), "EMPTY", "[.Y1]");
+}
+
+/// Such a cell in the first row of the sheet; the columns before it are left blank.
+void empty_text_cell(pugi::xml_node row, std::size_t filled) {
+    pugi::xml_node gap = cell(row);
+    gap.append_attribute("table:number-columns-repeated") = static_cast<unsigned>(24 - filled);
+    formula_cell(row, "of:=\"\"");
+}
+
+void add(pugi::xml_node table, WrongInput const& input, std::size_t number) {
+    std::vector<std::string> typed;
     const std::string call =
-        replaced(registration::writers::stored_formula(input.call), "BLANK", "[.$Z$1]");
+        with_cells(registration::writers::stored_formula(input.call), number, typed);
+    const std::string value = replaced_bracket(call, "SHOW", quoted);
+    const std::string reason = replaced_bracket(
+        call, "SHOW", [](std::string const& show) { return quoted("why in " + show); });
     pugi::xml_node row = table.append_child("table:table-row");
     text_cell(row, input.call);
-    formula_cell(row, replaced(call, "SHOW", ""));
+    formula_cell(row, replaced(value, "SHOW", ""));
     text_cell(row, input.error);
-    formula_cell(row, replaced(call, "SHOW", "\"why\""));
+    formula_cell(row, replaced(reason, "SHOW", "\"why\""));
     text_cell(row, input.piece);
+    for (std::string const& text : typed) text_cell(row, text);
+    if (number == 1) empty_text_cell(row, 5 + typed.size());
 }
 
 void write(std::vector<WrongInput> const& inputs, std::ostream& out) {
@@ -75,7 +125,8 @@ void write(std::vector<WrongInput> const& inputs, std::ostream& out) {
                                .append_child("office:spreadsheet")
                                .append_child("table:table");
     table.append_attribute("table:name") = "Wrong inputs";
-    for (WrongInput const& input : inputs) add(table, input);
+    std::size_t number = 0;
+    for (WrongInput const& input : inputs) add(table, input, ++number);
     document.save(out, " ");
 }
 

@@ -1,9 +1,10 @@
 // SPDX-License-Identifier: MPL-2.0
-#include "registration/results.h"
+#include "registration/catalogue/catalogue.h"
 #include "tests/registration/formula_call.h"
 
 #include <gtest/gtest.h>
 
+#include <algorithm>
 #include <cmath>
 
 // Columns: cell language §3. One bad row never spoils its neighbours.
@@ -26,6 +27,31 @@ TEST(Columns, UnderHeadingsGiveARowEach) {
     ASSERT_EQ(answer.columns, 1u);
     expect_fusion(answer, 0, 18.7, 1941.15);
     expect_fusion(answer, 2, 7.03, 505.08);
+}
+
+TEST(Columns, WorkForEveryFunction) {
+    std::size_t seen = 0;
+    for (auto const& section : registration::catalogue::sections())
+        for (auto const& entry : section.entries)
+            for (auto const& example : entry.examples) {
+                // `show` is one cell, so examples with one are left to the tests of show.
+                if (!example.formula ||
+                    std::string_view(example.formula).find('{') != std::string_view::npos)
+                    continue;
+                const std::size_t given = static_cast<std::size_t>(std::ranges::count(
+                                              std::string_view(example.formula), ';')) +
+                                          1;
+                if (entry.argument_count() == 0 ||
+                    given > entry.position(registration::Argument::Role::show))
+                    continue;
+                SCOPED_TRACE(example.formula);
+                ++seen;
+                const std::string single = text(tests::call_formula(example.formula));
+                const Answer answer = tests::call_formula_in_rows(example.formula, 3);
+                ASSERT_EQ(answer.rows, 3u);
+                for (std::size_t row = 0; row < 3; ++row) EXPECT_EQ(text(answer, row), single);
+            }
+    EXPECT_GE(seen, 27u);
 }
 
 TEST(Columns, MayBeRowsOfValueAndUnit) {

@@ -56,6 +56,11 @@ Range Range::row(std::vector<Range> cells) {
     return Range(std::vector<std::vector<Range>>{std::move(cells)});
 }
 
+Range Range::repeated(std::size_t rows) const {
+    if (cells_.size() != 1) return *this;
+    return column(std::vector<Range>(rows, *this));
+}
+
 Answer call(std::string_view function, std::vector<Range> const& arguments) {
     registration::Entry const* entry = registration::catalogue::find(function);
     if (!entry) throw std::logic_error("no such function: " + std::string(function));
@@ -72,7 +77,7 @@ namespace {
 /// Takes a formula apart; only what the documented examples use.
 class Reader {
 public:
-    explicit Reader(std::string_view text) : text_(text) {}
+    Reader(std::string_view text, std::size_t rows) : text_(text), rows_(rows) {}
 
     Answer run() {
         const std::size_t bracket = text_.find('(');
@@ -80,7 +85,7 @@ public:
         at_ = bracket + 1;
         std::vector<Range> arguments;
         for (bool more = peek() != ')'; more;) {
-            arguments.push_back(argument());
+            arguments.push_back(argument().repeated(rows_));
             more = peek() == ';';
             if (more) ++at_;
         }
@@ -130,6 +135,7 @@ private:
     }
 
     std::string_view text_;
+    std::size_t rows_;
     std::size_t at_ = 0;
 };
 
@@ -148,7 +154,11 @@ std::string error_name(double number) {
 
 } // namespace
 
-Answer call_formula(std::string_view formula) { return Reader(formula).run(); }
+Answer call_formula(std::string_view formula) { return Reader(formula, 1).run(); }
+
+Answer call_formula_in_rows(std::string_view formula, std::size_t rows) {
+    return Reader(formula, rows).run();
+}
 
 double number(Answer const& answer) {
     if (answer.kind != Answer::Kind::numbers)

@@ -22,6 +22,9 @@ public:
     static Range row(std::vector<Range> cells);
     static Range table(std::vector<std::vector<Range>> rows) { return Range(std::move(rows)); }
 
+    /// The same cell in every row of a column; a range or a left-out argument stays what it is.
+    Range repeated(std::size_t rows) const;
+
     registration::Block block() const {
         return {cells_.empty() ? nullptr : cells_.data(), rows_, columns_};
     }
@@ -42,6 +45,10 @@ registration::Answer call(std::string_view function, std::vector<Range> const& a
 /// Calls `ENTROPY.FUSION("18.7 kJ/mol"; "1668 °C")` as a cell would: texts, numbers, inline arrays
 /// with `;` between columns and `|` between rows, left-out arguments, no nesting.
 registration::Answer call_formula(std::string_view formula);
+
+/// The same with every single text or number repeated `rows` times down a column; ranges, the
+/// arguments of whole columns, stay as they are.
+registration::Answer call_formula_in_rows(std::string_view formula, std::size_t rows);
 
 /// The one number or text of an answer; an error reads as "#VALUE!", "#NUM!" or "Err:523".
 double number(registration::Answer const&);
