@@ -14,7 +14,7 @@ void refuse_condition(int argument, Given const& given, std::size_t row, const c
 }
 
 void argument<NamedSubstance>::check(Given const& given) {
-    if (given.cell_count() == 1) static_cast<void>(molar_mass_of(given, 0));
+    if (given.cell_count() == 1) static_cast<void>(molar_mass_of(need.kind, given, 0));
 }
 
 } // namespace registration

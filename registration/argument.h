@@ -238,12 +238,23 @@ struct argument<AnyQuantity> : Unchecked {
     };
 };
 
+/// Stands where an argument is left out that other forms of a function take.
+struct LeftOut {};
+template<>
+struct argument<LeftOut> : Unchecked {
+    static constexpr Need need{.kind = Need::Kind::left_out, .optional = true};
+    struct Rows {
+        Rows(Given const&, int) {}
+        LeftOut operator[](std::size_t) const { return {}; }
+    };
+};
+
 /// A substance named only for what a mole of it weighs. Functions do not look at it: it serves the
 /// amount and the unit of the result (evaluation.h).
 struct NamedSubstance {};
 template<>
 struct argument<NamedSubstance> {
-    static constexpr Need need{.kind = Need::Kind::substance,
+    static constexpr Need need{.kind = Need::Kind::named,
                                .dimension = core::dimension<core::MolarMass>};
     struct Rows {
         Rows(Given const&, int) {}
@@ -313,6 +324,8 @@ inline constexpr Outcome outcome_of<AnyQuantity>{.follows_first = true};
 template<>
 inline constexpr Outcome outcome_of<std::string>{.kind = Outcome::Kind::text};
 template<>
+inline constexpr Outcome outcome_of<Array>{.kind = Outcome::Kind::array};
+template<>
 inline constexpr Outcome outcome_of<std::vector<double>>{.column = true};
 
 template<class Unit>
@@ -329,6 +342,7 @@ inline void put(Results& results, std::size_t row, double value) { results.put(r
 inline void put(Results& results, std::size_t row, std::string value) {
     results.put(row, std::move(value));
 }
+inline void put(Results& results, std::size_t, Array array) { results.put(std::move(array)); }
 inline void put(Results& results, std::size_t, std::vector<double> const& values) {
     results.put_all(values);
 }

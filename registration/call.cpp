@@ -102,6 +102,7 @@ public:
     Answer answer() {
         if (show_.is_prose()) return prose();
         if (evaluation_.outcome().kind == Outcome::Kind::text) return texts_as_they_are();
+        if (evaluation_.outcome().kind == Outcome::Kind::array) return array();
         Results results = evaluation_.results(core::silent, false);
         if (show_.view == View::number) return numbers(std::move(results));
         return with_uncertainty(results);
@@ -172,6 +173,25 @@ private:
         answer.texts = std::move(results.texts);
         for (auto const& failed : results.failures_in_texts)
             answer.errors.push_back({failed.row, error_number(failed.kind)});
+        return answer;
+    }
+
+    Answer array() {
+        if (evaluation_.rows() != 1)
+            core::refuse_unfit("a column",
+                               "one value for each argument, since the result is an array",
+                               "call the function once a row");
+        Results results = evaluation_.results(core::silent, true);
+        if (Failure const* fault = results.fault(0)) throw Failure(*fault);
+        Array& made = results.arrays.at(0);
+        Answer answer;
+        answer.kind = Answer::Kind::cells;
+        answer.rows = made.rows();
+        answer.columns = made.columns();
+        answer.numbers.assign(made.numbers.begin(), made.numbers.end());
+        answer.texts = std::move(made.texts);
+        for (std::size_t at = 0; at < made.blanks.size(); ++at)
+            if (made.blanks[at]) answer.blanks.push_back(at);
         return answer;
     }
 

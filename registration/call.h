@@ -16,13 +16,14 @@ namespace registration {
 /// What a call hands back to the office: a rectangle of numbers or of texts, row by row. A number
 /// may be an error (error_number in results.h); a blank row of the input is a blank row here.
 struct Answer {
-    enum class Kind : std::uint8_t { numbers, texts };
+    enum class Kind : std::uint8_t { numbers, texts, cells };
 
     Kind kind = Kind::numbers;
     std::size_t rows = 1, columns = 1;
     boost::container::small_vector<double, 1> numbers; ///< one a cell, where kind is numbers
     std::vector<std::string> texts;                    ///< one a cell, where kind is texts
-    std::vector<std::size_t> blanks;                   ///< cells to be left empty, rising
+    /// Where kind is cells, a cell is its text, or its number where the text is empty.
+    std::vector<std::size_t> blanks; ///< cells to be left empty, rising
     /// Cells of a text answer that are errors after all.
     struct Error {
         std::size_t cell;

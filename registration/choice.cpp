@@ -94,6 +94,9 @@ std::optional<Failure> unreadable(Entry const& entry, std::span<const Given> inp
                           : Failure(Failure::Kind::unfit, "a value",
                                     "nothing here with the other arguments as they are",
                                     "leave the argument out");
+    // A text that cannot be read has told its own need already.
+    const bool told = at < best->needs.size() && !inputs[at].missing() &&
+                      !inputs[at].if_numbers() && best->needs[at].kind == Need::Kind::quantity;
     std::vector<std::string> needs;
     for (Form const& form : entry.all_forms())
         for (Overload const& overload : form.overloads) {
@@ -104,7 +107,7 @@ std::optional<Failure> unreadable(Entry const& entry, std::span<const Given> inp
             const std::string text = described(overload.needs[at]);
             if (std::ranges::find(needs, text) == needs.end()) needs.push_back(text);
         }
-    if (!needs.empty()) failure.needed = joined(needs);
+    if (!needs.empty() && !told) failure.needed = joined(needs);
     failure.argument = static_cast<int>(at);
     throw failure;
 }

@@ -26,7 +26,7 @@ bool is_amount(Dimension d) {
 
 /// Whether an argument is looked at as numbers; a substance is where its molar mass stands for it.
 bool is_numeric(Need const& need, Given const& given) {
-    if (need.kind == Need::Kind::substance) return tells_molar_mass(given);
+    if (need.kind == Need::Kind::named) return tells_molar_mass(given);
     return need.kind == Need::Kind::quantity || need.kind == Need::Kind::any_quantity;
 }
 
@@ -47,7 +47,7 @@ bool is_blank(Need const& need, Given const& given, std::size_t row) {
 bool is_clean(Need const& need, Given const& given) {
     if (is_numeric(need, given))
         return given.numbers().faults.empty() && given.numbers().blanks.empty();
-    if (need.kind == Need::Kind::substance) return false;
+    if (need.kind == Need::Kind::named) return false;
     for (std::size_t row = 0; row < given.cell_count(); ++row)
         if (given.cell(row).kind != Cell::Kind::text) return false;
     return true;
@@ -198,8 +198,8 @@ void Evaluation::mark_text(Listed const& column, std::size_t row) {
     try {
         if (cell.kind == Cell::Kind::number)
             core::refuse_unfit("a number", described(*column.need), "write it as text");
-        if (column.need->kind == Need::Kind::substance)
-            static_cast<void>(molar_mass_of(*column.given, row));
+        if (column.need->kind == Need::Kind::named)
+            static_cast<void>(molar_mass_of(column.need->kind, *column.given, row));
     } catch (Failure& failure) {
         spoil(row, std::move(failure), column.position);
     }
@@ -235,9 +235,22 @@ void Evaluation::mark_rows() {
 
 std::optional<double> Evaluation::molar_mass(std::size_t row) const {
     for (std::size_t i = 0; i < overload().needs.size(); ++i)
-        if (overload().needs[i].kind == Need::Kind::substance && !arguments_.inputs[i].missing())
-            return molar_mass_of(arguments_.inputs[i], row);
+        if (knows_molar_mass(overload().needs[i].kind) && !arguments_.inputs[i].missing())
+            return molar_mass_of(overload().needs[i].kind, arguments_.inputs[i], row);
     return std::nullopt;
+}
+
+/// The molar masses of all rows; a substance that stands for all of them is looked up once.
+MolarMasses Evaluation::molar_masses() const {
+    for (std::size_t i = 0; i < overload().needs.size(); ++i) {
+        Need const& need = overload().needs[i];
+        Given const& given = arguments_.inputs[i];
+        if (!knows_molar_mass(need.kind) || given.missing()) continue;
+        if (count_of(need, given) == 1)
+            return {molar_mass_of(need.kind, given, 0), nullptr, need.kind};
+        return {0, &given, need.kind};
+    }
+    return {};
 }
 
 void Evaluation::weigh_amount() {
@@ -278,6 +291,7 @@ void Evaluation::multiply(Results& results) const {
     Given const& given = arguments_.amount;
     const std::size_t stride = given.numbers().listed ? 1 : 0;
     const double* amounts = given.si();
+    const MolarMasses masses = bridge_ == Bridge::none ? MolarMasses{} : molar_masses();
     for (std::size_t row = 0; row < results.numbers.size(); ++row) {
         if (results.failed(row) || (!states_.empty() && states_[row] != State::good)) continue;
         const double amount = amounts[row * stride];
@@ -291,8 +305,8 @@ void Evaluation::multiply(Results& results) const {
             continue;
         }
         double value = results.numbers[row] * amount;
-        if (bridge_ == Bridge::over_molar_mass) value /= *molar_mass(row);
-        if (bridge_ == Bridge::times_molar_mass) value *= *molar_mass(row);
+        if (bridge_ == Bridge::over_molar_mass) value /= masses(row);
+        if (bridge_ == Bridge::times_molar_mass) value *= masses(row);
         results.put(row, value);
     }
 }

@@ -2,6 +2,7 @@
 #pragma once
 
 #include "registration/choice.h"
+#include "registration/molar_mass.h"
 
 #include <boost/container/static_vector.hpp>
 
@@ -19,6 +20,16 @@ struct Arguments {
     boost::container::static_vector<Given, Entry::most_arguments> inputs;
 
     std::span<const Given> given() const { return {inputs.data(), inputs.size()}; }
+};
+
+/// What a mole weighs, in every row.
+struct MolarMasses {
+    double only = 0;
+    Given const* given = nullptr; ///< a column of substances, or null where one stands for all
+    Need::Kind kind = Need::Kind::named;
+    double operator()(std::size_t row) const {
+        return given ? molar_mass_of(kind, *given, row) : only;
+    }
 };
 
 /// One call under way: the overload chosen, the rows there are, and what the amount does to the
@@ -49,6 +60,7 @@ public:
     std::vector<std::size_t> const& blanks_of_first() const { return blanks_of_first_; }
     /// What a mole of the substance of a row weighs, where the call names a substance.
     std::optional<double> molar_mass(std::size_t row) const;
+    MolarMasses molar_masses() const;
     Entry const& entry() const { return entry_; }
     Arguments const& arguments() const { return arguments_; }
 

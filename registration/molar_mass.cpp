@@ -2,6 +2,8 @@
 #include "registration/molar_mass.h"
 
 #include "core/substances/formula.h"
+#include "core/substances/gas.h"
+#include "core/substances/substance.h"
 
 namespace registration {
 
@@ -15,9 +17,34 @@ bool tells_molar_mass(Given const& given) {
     return false;
 }
 
-double molar_mass_of(Given const& given, std::size_t row) {
+bool knows_molar_mass(Need::Kind kind) {
+    return kind == Need::Kind::named || kind == Need::Kind::substance || kind == Need::Kind::gas;
+}
+
+namespace {
+
+/// A formula, or else a name of the tables.
+double of_named(std::string_view text) {
+    try {
+        return core::substances::molar_mass(text).value();
+    } catch (core::Failure const& failure) {
+        try {
+            return core::substances::find_substance(text).molar_mass().value();
+        } catch (core::Failure const&) {
+            throw failure;
+        }
+    }
+}
+
+} // namespace
+
+double molar_mass_of(Need::Kind kind, Given const& given, std::size_t row) {
+    const std::string_view text = given.cell(row).text;
+    if (kind == Need::Kind::substance)
+        return core::substances::find_substance(text).molar_mass().value();
+    if (kind == Need::Kind::gas) return core::substances::read_gas(text).molar_mass().value();
     if (tells_molar_mass(given)) return given.si()[given.numbers().listed ? row : 0];
-    return core::substances::molar_mass(given.cell(row).text).value();
+    return of_named(text);
 }
 
 } // namespace registration

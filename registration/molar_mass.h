@@ -1,14 +1,17 @@
 // SPDX-License-Identifier: MPL-2.0
 #pragma once
 
-#include "registration/given.h"
+#include "registration/need.h"
 
 namespace registration {
 
 /// Whether a substance is told by its molar mass: a formula never begins with a digit.
 bool tells_molar_mass(Given const&);
 
-/// The molar mass that a substance argument tells: of its formula, or the value itself.
-double molar_mass_of(Given const&, std::size_t row);
+/// Whether an argument of this kind tells what a mole weighs.
+bool knows_molar_mass(Need::Kind);
+
+/// What a mole of the substance, gas or mixture in a row weighs.
+double molar_mass_of(Need::Kind, Given const&, std::size_t row);
 
 } // namespace registration

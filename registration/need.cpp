@@ -5,6 +5,8 @@
 #include "core/text/quantity.h"
 #include "registration/molar_mass.h"
 
+#include <cctype>
+
 namespace registration {
 namespace {
 
@@ -25,6 +27,21 @@ bool is_filled_text(Given const& given) {
         if (given.cell(row).kind != Cell::Kind::blank)
             return given.cell(row).kind == Cell::Kind::text;
     return false;
+}
+
+/// Substances are told from quantities by how they begin: no number stands in front.
+bool begins_with_letter(Given const& given) {
+    if (!is_filled_text(given)) return false;
+    for (std::size_t row = 0; row < given.cell_count(); ++row)
+        if (const std::string_view text = given.cell(row).text; !text.empty())
+            return std::isalpha(static_cast<unsigned char>(text[0])) || text[0] == '[' ||
+                   text[0] == '(' || (text[0] & '\x80');
+    return false;
+}
+
+/// A mixture begins with a number as a quantity does, and then adds.
+bool is_mixture(Given const& given) {
+    return is_filled_text(given) && given.cell(0).text.find(" + ") != std::string_view::npos;
 }
 
 bool is_table(Given const& given) {
@@ -93,9 +110,17 @@ bool accepts(Need const& need, Given const& given) {
     case Need::Kind::text:
         return is_filled_text(given);
     case Need::Kind::substance:
+    case Need::Kind::equation:
+        return begins_with_letter(given) ||
+               (need.kind == Need::Kind::equation && is_filled_text(given));
+    case Need::Kind::gas:
+        return begins_with_letter(given) || is_mixture(given);
+    case Need::Kind::named:
         return tells_molar_mass(given) ? fits_numbers(need, given) : is_filled_text(given);
     case Need::Kind::cell:
         return true;
+    case Need::Kind::left_out:
+        return false;
     case Need::Kind::table:
         return is_table(given);
     }
@@ -128,8 +153,16 @@ std::string described(Need const& need) {
         return "a quantity with its unit";
     case Need::Kind::text:
         return "a text";
-    case Need::Kind::substance:
+    case Need::Kind::named:
         return "a chemical formula, or a molar mass";
+    case Need::Kind::substance:
+        return "a substance by formula or name";
+    case Need::Kind::gas:
+        return "a gas such as `N2`, or a mixture such as `0.79 N2 + 0.21 O2`";
+    case Need::Kind::equation:
+        return "a reaction equation such as `2 Al + 3/2 O2 -> Al2O3`";
+    case Need::Kind::left_out:
+        return "nothing";
     case Need::Kind::cell:
         return "a cell";
     case Need::Kind::table:

@@ -16,8 +16,12 @@ struct Need {
         quantity,     ///< numbers of the dimension below
         any_quantity, ///< numbers of whatever dimension
         text,         ///< a text in every row: a formula, a unit
-        substance,    ///< a formula, or where only its molar mass is needed that molar mass
+        named,        ///< a substance only for its molar mass, which may stand in its place
+        substance,    ///< a substance of the tables
+        gas,          ///< a gas of the tables or a mixture of such
+        equation,     ///< a reaction equation
         cell,         ///< a cell as it stands
+        left_out,     ///< nothing, where other forms of the function take a value
         table,        ///< a rectangle of plain numbers
     };
 

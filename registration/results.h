@@ -2,6 +2,7 @@
 #pragma once
 
 #include "core/failure.h"
+#include "registration/array.h"
 #include "registration/numbers.h"
 
 #include <boost/container/small_vector.hpp>
@@ -23,7 +24,7 @@ inline double error_number(core::Failure::Kind kind) {
 
 /// What an overload gives back, derived from its return type (argument.h).
 struct Outcome {
-    enum class Kind : std::uint8_t { number, text };
+    enum class Kind : std::uint8_t { number, text, array };
 
     Kind kind = Kind::number;
     core::Dimension dimension{};
@@ -50,13 +51,14 @@ public:
         if (!(value - value == 0)) return overflow(row);
         numbers[row] = value;
     }
+    void put(Array made) { arrays.push_back(std::move(made)); }
     void put(std::size_t row, std::string text) { texts[row] = std::move(text); }
     void put_all(std::vector<double> const& values) {
         numbers.resize(values.size());
         for (std::size_t row = 0; row < values.size(); ++row) put(row, values[row]);
     }
     void fail(std::size_t row, core::Failure failure) {
-        if (outcome.kind == Outcome::Kind::text)
+        if (outcome.kind != Outcome::Kind::number)
             failures_in_texts.push_back({row, failure.kind});
         else
             numbers[row] = error_number(failure.kind);
@@ -75,6 +77,7 @@ public:
     Outcome outcome;
     boost::container::small_vector<double, 1> numbers;
     std::vector<std::string> texts;
+    std::vector<Array> arrays; ///< one, where the outcome is an array and it was made
     std::vector<FailedText> failures_in_texts;
     std::vector<RowFault> faults; ///< filled only where the reasons were asked for
 

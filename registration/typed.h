@@ -59,12 +59,22 @@ private:
         check(given, std::make_index_sequence<count>{});
     }
 
+    /// Arguments that are read on the way may have something to remark.
+    template<std::size_t I>
+    static auto make_rows(Given const& given, [[maybe_unused]] core::Notes const& notes) {
+        using Rows = typename argument<Parameter<I>>::Rows;
+        if constexpr (std::is_constructible_v<Rows, Given const&, int, core::Notes const&>)
+            return Rows(given, static_cast<int>(I), notes);
+        else
+            return Rows(given, static_cast<int>(I));
+    }
+
     template<std::size_t... I>
     static void run([[maybe_unused]] std::span<const Given> given, std::size_t first,
                     std::size_t last, Results& results, core::Notes const& notes,
                     std::index_sequence<I...>) {
         [[maybe_unused]] const std::tuple<typename argument<Parameter<I>>::Rows...> rows{
-            typename argument<Parameter<I>>::Rows(given[I], static_cast<int>(I))...};
+            make_rows<I>(given[I], notes)...};
         for (std::size_t row = first; row < last; ++row) {
             try {
                 if constexpr (takes_notes)

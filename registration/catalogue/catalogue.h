@@ -14,9 +14,12 @@ namespace registration::catalogue {
 std::span<const Entry> phase_change();
 std::span<const Entry> heat();
 std::span<const Entry> simple_processes();
+std::span<const Entry> variable_heat_capacity();
+std::span<const Entry> tables();
 std::span<const Entry> mixing();
 std::span<const Entry> balance();
 std::span<const Entry> end_states();
+std::span<const Entry> heated_bodies();
 std::span<const Entry> missing_data();
 std::span<const Entry> quantities();
 std::span<const Entry> formulas();

@@ -3,6 +3,7 @@
 
 #include "core/processes/ideal_gas.h"
 #include "registration/catalogue/shared_arguments.h"
+#include "registration/substance_arguments.h"
 
 namespace registration::catalogue {
 namespace {
@@ -39,10 +40,14 @@ constexpr Entry entries[] = {
                          .says = "isentropic efficiency, above 0 and up to 1; 1 if left out",
                          .example = "0.8"},
                         show}},
-         .forms = {form<ideal_end>("T2 = T1 · (p2 / p1)^(R / cp)", isentropic, valid),
-                   form<real_end>(
-                       "T2 = T1 + (T2s - T1) / η of a compressor, T1 - η · (T1 - T2s) of a turbine",
-                       isentropic, valid)},
+         .forms =
+             {form<ideal_end>("T2 = T1 · (p2 / p1)^(R / cp)", isentropic, valid),
+              form<real_end>(
+                  "T2 = T1 + (T2s - T1) / η of a compressor, T1 - η · (T1 - T2s) of a turbine",
+                  isentropic, valid),
+              form<core::substances::temperature_adiabatic>(
+                  "∫cp/T dT from T1 to T2s = R · ln(p2 / p1), and the enthalpy of a real step by η",
+                  report, table_gas)},
          .examples =
              {{{"TEMPERATURE.ADIABATIC(\"29.10061916353634 J/(mol·K)\"; \"300 K\"; \"1 bar\"; \"10 "
                 "bar\")",
@@ -54,9 +59,13 @@ constexpr Entry entries[] = {
          .says = "Isentropic efficiency of an adiabatic compressor or turbine, told apart by the "
                  "pressures.",
          .arguments = {{constant_cp, temperature_1, pressure_1, temperature_2, pressure_2, show}},
-         .forms = {form<efficiency_isentropic>(
-             "η = (T2s - T1) / (T2 - T1) of a compressor, (T1 - T2) / (T1 - T2s) of a turbine",
-             isentropic, valid)},
+         .forms =
+             {form<efficiency_isentropic>(
+                  "η = (T2s - T1) / (T2 - T1) of a compressor, (T1 - T2) / (T1 - T2s) of a turbine",
+                  isentropic, valid),
+              form<core::substances::efficiency_isentropic>(
+                  "η = (h2s - h1) / (h2 - h1) of a compressor, (h1 - h2) / (h1 - h2s) of a turbine",
+                  report, table_gas)},
          .examples = {{{"EFFICIENCY.ISENTROPIC(\"29.1 J/(mol·K)\"; \"20 °C\"; \"1 bar\"; \"545 "
                         "K\"; \"7 bar\")",
                         0.8656098056970883}}}}),

@@ -2,6 +2,9 @@
 #include "registration/catalogue/catalogue.h"
 
 #include "core/processes/phase_change.h"
+#include "core/substances/transition.h"
+#include "registration/catalogue/shared_arguments.h"
+#include "registration/substance_arguments.h"
 
 namespace registration::catalogue {
 namespace {
@@ -14,29 +17,50 @@ constexpr const char* clausius =
 constexpr Form equilibrium = form<transition<Molar>, transition<Specific>, transition<Total>>(
     "ΔS = ΔH / T", clausius, "at the equilibrium temperature of the pressure that ΔH belongs to");
 
+core::MolarEntropy fusion_of(core::substances::Substance const& substance,
+                             core::Notes const& notes) {
+    return core::substances::fusion(substance, notes).entropy;
+}
+core::MolarEntropy vaporization_of(core::substances::Substance const& substance,
+                                   core::Notes const& notes) {
+    return core::substances::vaporization(substance, notes).entropy;
+}
+core::MolarEntropy transition_of(core::substances::Substance const& substance,
+                                 core::Temperature near, core::Notes const& notes) {
+    return core::substances::transition_near(substance, near, notes).entropy;
+}
+
+constexpr const char* at_one_bar = "at 1 bar; ΔS is the difference of the entropies of both phases";
+
 constexpr Entry entries[] = {
-    describe({.name = "ENTROPY.FUSION",
-              .says = "Entropy of fusion: enthalpy of fusion over the melting temperature.",
-              .arguments = {{{.name = "what",
-                              .symbol = "ΔH",
-                              .says = "enthalpy of fusion, molar, specific or of the whole",
-                              .example = "13.81 kJ/mol"},
-                             {.name = "temperature",
-                              .symbol = "T",
-                              .says = "melting temperature",
-                              .example = "1538 °C"},
-                             amount,
-                             show}},
-              .forms = {equilibrium},
-              .examples = {{{"ENTROPY.FUSION(\"18.7 kJ/mol\"; \"1668 °C\")", 9.63346469876104},
-                            {"ENTROPY.FUSION(\"397 kJ/kg\"; \"660.3 °C\"; \"2 t\"; \"kJ/K\")",
-                             850.6079597193209}}}}),
+    describe(
+        {.name = "ENTROPY.FUSION",
+         .says = "Entropy of fusion: enthalpy of fusion over the melting temperature.",
+         .arguments =
+             {{{.name = "what",
+                .symbol = "ΔH",
+                .says = "enthalpy of fusion, molar, specific or of the whole; or a substance alone",
+                .example = "13.81 kJ/mol"},
+               {.name = "temperature",
+                .symbol = "T",
+                .says = "melting temperature",
+                .example = "1538 °C"},
+               amount,
+               show}},
+         .forms = {equilibrium,
+                   form<fusion_of>("ΔS = S(l) - S(cr), at the melting temperature of the tables",
+                                   report, at_one_bar)},
+         .examples = {{{"ENTROPY.FUSION(\"18.7 kJ/mol\"; \"1668 °C\")", 9.63346469876104},
+                       {"ENTROPY.FUSION(\"Al\")", 11.460887949580531},
+                       {"ENTROPY.FUSION(\"397 kJ/kg\"; \"660.3 °C\"; \"2 t\"; \"kJ/K\")",
+                        850.6079597193209}}}}),
     describe(
         {.name = "ENTROPY.VAPORIZATION",
          .says = "Entropy of vaporization: enthalpy of vaporization over the boiling temperature.",
          .arguments = {{{.name = "what",
                          .symbol = "ΔH",
-                         .says = "enthalpy of vaporization, molar, specific or of the whole",
+                         .says = "enthalpy of vaporization, molar, specific or of the whole; or a "
+                                 "substance alone, at 1 bar",
                          .example = "40.65 kJ/mol"},
                         {.name = "temperature",
                          .symbol = "T",
@@ -44,7 +68,9 @@ constexpr Entry entries[] = {
                          .example = "99.97 °C"},
                         amount,
                         show}},
-         .forms = {equilibrium},
+         .forms = {equilibrium, form<vaporization_of>(
+                                    "ΔS = S(g) - S(l), at the boiling temperature of the tables",
+                                    report, at_one_bar)},
          .examples = {{{"ENTROPY.VAPORIZATION(\"40.651 kJ/mol\"; \"373.124 K\")",
                         108.947695672216}}}}),
     describe(
@@ -53,7 +79,8 @@ constexpr Entry entries[] = {
                  "zero.",
          .arguments = {{{.name = "what",
                          .symbol = "ΔH",
-                         .says = "enthalpy of the transition in the heating direction",
+                         .says =
+                             "enthalpy of the transition in the heating direction; or a substance",
                          .example = "0.9 kJ/mol"},
                         {.name = "temperature",
                          .symbol = "T",
@@ -61,8 +88,13 @@ constexpr Entry entries[] = {
                          .example = "912 °C"},
                         amount,
                         show}},
-         .forms = {equilibrium},
-         .examples = {{{"ENTROPY.TRANSITION(\"0.9 kJ/mol\"; \"912 °C\")", 0.759397544614606}}}}),
+         .forms = {equilibrium,
+                   form<transition_of>(
+                       "ΔS = S(above) - S(below), at the transition of the tables nearest to T",
+                       report, at_one_bar)},
+         .examples = {{{"ENTROPY.TRANSITION(\"iron\"; \"900 °C\"; ; \"text\")", 0,
+                        "0.7602 J/(mol·K)"},
+                       {"ENTROPY.TRANSITION(\"0.9 kJ/mol\"; \"912 °C\")", 0.759397544614606}}}}),
 };
 
 } // namespace

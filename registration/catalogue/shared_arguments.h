@@ -22,10 +22,24 @@ inline constexpr Argument surroundings{.name = "surroundings",
                                        .symbol = "T0",
                                        .says = "temperature of the surroundings",
                                        .example = "15 °C"};
-inline constexpr Argument constant_cp{.name = "gas",
-                                      .symbol = "cp",
-                                      .says = "molar heat capacity of the gas at constant pressure",
-                                      .example = "29.1 J/(mol·K)"};
+inline constexpr Argument constant_cp{
+    .name = "gas",
+    .symbol = "cp",
+    .says = "a gas or mixture of the tables, or a molar heat capacity at constant pressure",
+    .example = "29.1 J/(mol·K)"};
+inline constexpr Argument substance{.name = "substance",
+                                    .symbol = "substance",
+                                    .says = "formula or common name, with or without a state",
+                                    .example = "Fe"};
+inline constexpr Argument temperature{
+    .name = "temperature", .symbol = "T", .says = "temperature", .example = "600 °C"};
+/// The published tables that functions of substances draw on.
+inline constexpr const char* report =
+    "B. J. McBride, M. J. Zehe, S. Gordon, NASA/TP-2002-211556 (2002), with its gas constant "
+    "8.314510 J/(mol·K); "
+    "oxides it lacks: R. A. Robie, B. S. Hemingway, USGS Bulletin 2131 (1995)";
+inline constexpr const char* table_gas =
+    "ideal gas or mixture, in the range of temperature that its components share";
 inline constexpr Argument mixed_substances{
     .name = "substances",
     .symbol = "substance",

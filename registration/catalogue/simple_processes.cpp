@@ -4,6 +4,7 @@
 #include "core/processes/ideal_gas.h"
 #include "core/processes/pressurizing.h"
 #include "registration/catalogue/shared_arguments.h"
+#include "registration/substance_arguments.h"
 
 namespace registration::catalogue {
 namespace {
@@ -103,25 +104,33 @@ constexpr Entry entries[] = {
                         amount,
                         show}},
          .forms = {form<polytropic>("ΔS = (cp - R · k / (k - 1)) · ln(T2 / T1)", ideal_gas,
-                                    ideal_gas_valid)},
+                                    ideal_gas_valid),
+                   form<core::substances::polytropic>(
+                       "ΔS = ∫cp/T dT - R · k / (k - 1) · ln(T2 / T1), cp of the tables", report,
+                       table_gas)},
          .examples = {{{"ENTROPY.POLYTROPIC(\"29.1 J/(mol·K)\"; 1.3; \"20 °C\"; \"420 K\")",
                         -2.4915840637029576}}}}),
-    describe({.name = "ENTROPY.GAS",
-              .says = "Entropy of a gas between two states of temperature and pressure.",
-              .arguments = {{constant_cp, temperature_1, pressure_1, temperature_2, pressure_2,
-                             amount, show}},
-              .forms = {form<entropy_of_gas>("ΔS = cp · ln(T2 / T1) - R · ln(p2 / p1)", ideal_gas,
-                                             ideal_gas_valid)},
-              .examples = {{{"ENTROPY.GAS(\"29.10061916353634 J/(mol·K)\"; \"300 K\"; \"1 bar\"; "
-                             "\"600 K\"; \"5 bar\")",
-                             6.789400766582013}}}}),
+    describe(
+        {.name = "ENTROPY.GAS",
+         .says = "Entropy of a gas between two states of temperature and pressure.",
+         .arguments = {{constant_cp, temperature_1, pressure_1, temperature_2, pressure_2, amount,
+                        show}},
+         .forms = {form<entropy_of_gas>("ΔS = cp · ln(T2 / T1) - R · ln(p2 / p1)", ideal_gas,
+                                        ideal_gas_valid),
+                   form<core::substances::entropy_of_gas>(
+                       "ΔS = ∫cp/T dT - R · ln(p2 / p1), cp of the tables", report, table_gas)},
+         .examples = {{{"ENTROPY.GAS(\"29.10061916353634 J/(mol·K)\"; \"300 K\"; \"1 bar\"; "
+                        "\"600 K\"; \"5 bar\")",
+                        6.789400766582013}}}}),
     describe({.name = "ENTHALPY.GAS",
               .says = "Enthalpy of an ideal gas between two states; the pressures do not matter, "
                       "they stand for the same rows as in ENTROPY.GAS.",
               .arguments = {{constant_cp, temperature_1, pressure_1, temperature_2, pressure_2,
                              amount, show}},
               .forms = {form<enthalpy_of_gas>("ΔH = cp · (T2 - T1)", "dh = cp · dT of an ideal gas",
-                                              ideal_gas_valid)},
+                                              ideal_gas_valid),
+                        form<core::substances::enthalpy_of_gas>("ΔH = ∫cp dT, cp of the tables",
+                                                                report, table_gas)},
               .examples =
                   {{{"ENTHALPY.GAS(\"29.1 J/(mol·K)\"; \"300 K\"; \"1 bar\"; \"450 K\"; \"7 bar\")",
                      4365}}}}),
@@ -132,8 +141,10 @@ constexpr Entry entries[] = {
          .arguments = {{constant_cp, temperature_1, pressure_1, temperature_2, pressure_2, amount,
                         show}},
          .forms = {form<adiabatic_generation>(
-             "Sgen = cp · ln(T2 / T1) - R · ln(p2 / p1)", ideal_gas,
-             "no heat crosses the boundary; ideal gas, cp constant or its mean")},
+                       "Sgen = cp · ln(T2 / T1) - R · ln(p2 / p1)", ideal_gas,
+                       "no heat crosses the boundary; ideal gas, cp constant or its mean"),
+                   form<core::substances::adiabatic_generation>(
+                       "Sgen = ∫cp/T dT - R · ln(p2 / p1), cp of the tables", report, table_gas)},
          .examples =
              {{{"ENTROPY.ADIABATIC(\"29.1 J/(mol·K)\"; \"20 °C\"; \"1 bar\"; \"520 K\"; \"7 bar\")",
                 0.49930450300334783}}}}),

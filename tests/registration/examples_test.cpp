@@ -36,10 +36,13 @@ TEST(Examples, GiveWhatTheySay) {
 
 TEST(Examples, StandInEveryFunctionThatTakesArguments) {
     for (auto const& section : catalogue::sections())
-        for (Entry const& entry : section.entries)
-            if (entry.argument_count() > 0) {
+        for (Entry const& entry : section.entries) {
+            // Arrays fill a rectangle; they have tests of their own.
+            const bool array = entry.forms[0].overloads[0].outcome.kind == Outcome::Kind::array;
+            if (entry.argument_count() > 0 && !array) {
                 EXPECT_NE(entry.examples[0].formula, nullptr) << entry.name;
             }
+        }
 }
 
 TEST(Examples, OfArgumentsCanBeRead) {

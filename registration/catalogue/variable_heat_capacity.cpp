@@ -1,0 +1,167 @@
+// SPDX-License-Identifier: MPL-2.0
+#include "core/substances/heating.h"
+#include "core/substances/reaction.h"
+#include "registration/catalogue/catalogue.h"
+#include "registration/catalogue/shared_arguments.h"
+#include "registration/substance_arguments.h"
+
+namespace registration {
+
+/// What the participants of a reaction are present at, one cell each: a pressure, a plain number, or
+/// blank for the standard state.
+struct Activities {
+    std::vector<core::substances::Activity> values;
+};
+template<>
+struct argument<Activities> : Unchecked {
+    static constexpr Need need{
+        .kind = Need::Kind::cell, .whole = true, .condition = "pressures and activities"};
+    struct Rows {
+        Rows(Given const& given, int) {
+            for (std::size_t row = 0; row < given.cell_count(); ++row)
+                activities.values.push_back(read(given.cell(row)));
+        }
+        Activities operator[](std::size_t) const { return activities; }
+        static core::substances::Activity read(Cell const& cell);
+        Activities activities;
+    };
+};
+
+core::substances::Activity argument<Activities>::Rows::read(Cell const& cell) {
+    if (cell.kind == Cell::Kind::blank) return {};
+    const Numbers numbers = [&] {
+        Numbers read;
+        read_numbers({&cell, 1, 1}, read);
+        return read;
+    }();
+    if (numbers.dimension == core::Dimension{})
+        return {.pressure = std::nullopt, .number = numbers.si[0]};
+    if (numbers.dimension == core::dimension<core::Pressure> && numbers.reading == Reading::plain)
+        return {.pressure = core::Pressure::from_value(numbers.si[0]), .number = std::nullopt};
+    core::refuse_unfit(written({&cell, 1, 1}, 0),
+                       "an absolute pressure or a plain number for each participant",
+                       "give gases a pressure, condensed phases a number, and leave a cell blank "
+                       "for the standard state");
+}
+
+namespace catalogue {
+namespace {
+
+using namespace core::substances;
+using core::Notes, core::Temperature;
+
+core::MolarEnergy gibbs_at_activities(Reaction const& reaction, Temperature temperature,
+                                      Activities const& activities, Notes const& notes) {
+    return gibbs_of_reaction(reaction, temperature, activities.values, notes);
+}
+
+constexpr Argument equation{.name = "equation",
+                            .symbol = "equation",
+                            .says = "balanced reaction equation, states where they matter",
+                            .example = "2 Al + 3/2 O2 -> Al2O3"};
+constexpr const char* phases_passed =
+    "1 bar, the stable phase at each temperature or the state that is written; no decomposition";
+constexpr const char* of_equation = "per mole of the equation as written, standard states at 1 bar";
+
+constexpr Entry entries[] = {
+    describe(
+        {.name = "ENTROPY.HEATING",
+         .says = "Entropy of heating a substance with variable heat capacity, every "
+                 "transition on the way passed; cooling is the negative.",
+         .arguments = {{substance, from_temperature, to_temperature, amount, show}},
+         .forms = {form<entropy_of_heating>(
+             "ΔS = Σ ∫cp/T dT + Σ ΔH/T, over the stretches and transitions from T1 to T2", report,
+             phases_passed)},
+         .examples = {{{"ENTROPY.HEATING(\"N2\"; \"298.15 K\"; \"1000 K\")", 36.56097979501541}}}}),
+    describe({.name = "ENTHALPY.HEATING",
+              .says =
+                  "Heat taken up by a substance with variable heat capacity at constant pressure, "
+                  "transitions included.",
+              .arguments = {{substance, from_temperature, to_temperature, amount, show}},
+              .forms = {form<enthalpy_of_heating>(
+                  "ΔH = Σ ∫cp dT + Σ ΔH, over the stretches and transitions from T1 to T2", report,
+                  phases_passed)},
+              .examples = {{{"ENTHALPY.HEATING(\"N2\"; \"298.15 K\"; \"1000 K\"; ; \"kJ/mol\")",
+                             21.462274589345895}}}}),
+    describe({.name = "HEAT.CAPACITY",
+              .says = "Heat capacity at constant pressure of a substance.",
+              .arguments = {{substance, temperature, show}},
+              .forms = {form<heat_capacity>("cp of the stable phase at T", report, phases_passed)},
+              .examples = {{{"HEAT.CAPACITY(\"N2\"; \"400 K\")", 29.24872456918585}}}}),
+    describe({.name = "ENTROPY.STANDARD",
+              .says = "Absolute entropy of a substance at 1 bar; of a gas at another pressure "
+                      "where one is given.",
+              .arguments = {{substance,
+                             temperature,
+                             {.name = "pressure",
+                              .symbol = "p",
+                              .says = "absolute pressure of a gas; 1 bar if left out",
+                              .example = "0.21 bar"},
+                             show}},
+              .forms = {form<entropy_standard>(
+                  "S = S°(T) - R · ln(p / 1 bar), the second term for gases", report,
+                  "ideal gas; condensed phases at 1 bar")},
+              .examples = {{{"ENTROPY.STANDARD(\"N2\"; \"298.15 K\")", 191.60971157263504}}}}),
+    describe({.name = "ENTROPY.REACTION",
+              .says = "Entropy of a reaction in standard states.",
+              .arguments = {{equation, temperature, show}},
+              .forms = {form<entropy_of_reaction>("ΔS° = Σ(ν · S°), over the participants", report,
+                                                  of_equation)},
+              .examples = {{{"ENTROPY.REACTION(\"N2 + 3 H2 -> 2 NH3\"; \"298.15 K\")",
+                             -198.11217589771962}}}}),
+    describe({.name = "ENTHALPY.REACTION",
+              .says = "Enthalpy of a reaction in standard states.",
+              .arguments = {{equation, temperature, show}},
+              .forms = {form<enthalpy_of_reaction>("ΔH° = Σ(ν · H°), over the participants", report,
+                                                   of_equation)},
+              .examples = {{{"ENTHALPY.REACTION(\"CO + 1/2 O2 -> CO2\"; \"298.15 K\"; \"kJ/mol\")",
+                             -282.97480430702836}}}}),
+    describe(
+        {.name = "GIBBS.REACTION",
+         .says =
+             "Gibbs energy of a reaction, in standard states or at given pressures and activities.",
+         .arguments = {{equation,
+                        temperature,
+                        {.name = "activities",
+                         .symbol = "a",
+                         .says = "one cell a species in the order of the equation: pressure, "
+                                 "number, or blank for the standard state",
+                         .example = "B5:B7"},
+                        show}},
+         .forms = {form<standard_gibbs_of_reaction>("ΔG° = Σ(ν · G°), over the participants",
+                                                    report, of_equation),
+                   form<gibbs_at_activities>(
+                       "ΔG = ΔG° + R · T · Σ(ν · ln(a)), a = p / 1 bar for gases", report,
+                       "ideal gases; activities as given")},
+         .examples = {{{"GIBBS.REACTION(\"CO + 1/2 O2 -> CO2\"; \"1000 K\"; ; \"kJ/mol\")",
+                        -195.57838240390814}}}}),
+    describe({.name = "EQUILIBRIUM.CONSTANT",
+              .says = "Equilibrium constant of a reaction, pressures of gases counted in bar.",
+              .arguments = {{equation, temperature, show}},
+              .forms = {form<equilibrium_constant>("K = exp(-ΔG° / (R · T)), ΔG° from the tables",
+                                                   report, of_equation)},
+              .examples = {{{"EQUILIBRIUM.CONSTANT(\"CO + H2O(g) -> CO2 + H2\"; \"1000 K\")",
+                             1.4339398731218909}}}}),
+    describe(
+        {.name = "EQUILIBRIUM.TEMPERATURE",
+         .says = "Temperature at which the standard Gibbs energy of a reaction is zero.",
+         .arguments = {{equation,
+                        {.name = "from",
+                         .symbol = "T1",
+                         .says = "lower end of the search; the range of the data if left out",
+                         .example = "500 K"},
+                        {.name = "to",
+                         .symbol = "T2",
+                         .says = "upper end of the search",
+                         .example = "1500 K"},
+                        show}},
+         .forms = {form<equilibrium_temperature>("ΔG°(T) = 0, solved for T", report, of_equation)},
+         .examples = {{{"EQUILIBRIUM.TEMPERATURE(\"CaCO3 -> CaO + CO2\")", 1159.0883711190586}}}}),
+};
+
+} // namespace
+
+std::span<const Entry> variable_heat_capacity() { return entries; }
+
+} // namespace catalogue
+} // namespace registration
