@@ -23,12 +23,13 @@ bool fits(Overload const& overload, std::span<const Given> inputs) {
     return true;
 }
 
-/// How far an argument is from what an overload takes: of the right dimension but read otherwise,
-/// of another kind, or one too many, which can only be left out.
+/// How far an argument is from what an overload takes: missing, or of the right dimension but read
+/// otherwise; of another kind; or one too many, which can only be left out.
 std::size_t distance(Overload const& overload, std::span<const Given> inputs, std::size_t input) {
     if (fits(overload, inputs, input)) return 0;
     if (input >= overload.needs.size()) return 4;
-    Numbers const* numbers = inputs[input].missing() ? nullptr : inputs[input].if_numbers();
+    if (inputs[input].missing()) return 1;
+    Numbers const* numbers = inputs[input].if_numbers();
     return numbers && !numbers->bare && numbers->dimension == overload.needs[input].dimension ? 1
                                                                                               : 2;
 }

@@ -40,14 +40,14 @@ constexpr Entry entries[] = {
                          .says = "isentropic efficiency, above 0 and up to 1; 1 if left out",
                          .example = "0.8"},
                         show}},
-         .forms =
-             {form<ideal_end>("T2 = T1 · (p2 / p1)^(R / cp)", isentropic, valid),
-              form<real_end>(
-                  "T2 = T1 + (T2s - T1) / η of a compressor, T1 - η · (T1 - T2s) of a turbine",
-                  isentropic, valid),
-              form<core::substances::temperature_adiabatic>(
-                  "∫cp/T dT from T1 to T2s = R · ln(p2 / p1), and the enthalpy of a real step by η",
-                  report, table_gas)},
+         .forms = {form<ideal_end>("T2 = T1 · (p2 / p1)^(R / cp)", isentropic, valid),
+                   form<real_end>(
+                       "T2 = T1 + (T2s - T1) / η of a compressor, T1 - η · (T1 - T2s) of a turbine",
+                       isentropic, valid),
+                   form<core::substances::temperature_adiabatic>(
+                       "T2 = T(h2), h2 - h1 = (h2s - h1) / η of a compressor, (h2s - h1) · η of a "
+                       "turbine, ∫cp/T dT from T1 to T2s = R · ln(p2 / p1)",
+                       report, table_gas)},
          .examples =
              {{{"TEMPERATURE.ADIABATIC(\"29.10061916353634 J/(mol·K)\"; \"300 K\"; \"1 bar\"; \"10 "
                 "bar\")",

@@ -99,8 +99,11 @@ constexpr Entry entries[] = {
                               .example = "0.21 bar"},
                              show}},
               .forms = {form<entropy_standard>(
-                  "S = S°(T) - R · ln(p / 1 bar), the second term for gases", report,
-                  "ideal gas; condensed phases at 1 bar")},
+                            "S = S°(T) - R · ln(p / 1 bar), the second term for gases", report,
+                            "ideal gas; condensed phases at 1 bar"),
+                        form<entropy_standard_of_gas>("S = Σ(x · S°(T)) - R · Σ(x · ln(x)) - R · "
+                                                      "ln(p / 1 bar), over the gases of a mixture",
+                                                      report, table_gas)},
               .examples = {{{"ENTROPY.STANDARD(\"N2\"; \"298.15 K\")", 191.60971157263504}}}}),
     describe({.name = "ENTROPY.REACTION",
               .says = "Entropy of a reaction in standard states.",
