@@ -23,6 +23,8 @@ public:
     void remark(Text&& text) const {
         if (remarks_ != nullptr) remarks_->push_back(text());
     }
+    /// Whether it is worth finding out what to remark.
+    bool hears_remarks() const { return remarks_ != nullptr; }
 
 private:
     std::vector<std::string>* steps_ = nullptr;

@@ -67,6 +67,8 @@ std::string example_with_unit(Given const& given, Need const& need) {
 
 /// The numbers can be read, but are not of the kind that is needed.
 Failure wrong_kind(Need const& need, Given const& given, Numbers const& numbers) {
+    if (numbers.blanks.size() == numbers.count())
+        return Failure(Failure::Kind::unfit, "blank cells only", described(need), "fill the cells");
     const std::string given_text = written(given.block(), 0);
     const auto unfit = [&](std::string what, std::string repair) {
         return Failure(Failure::Kind::unfit, std::move(what), described(need), std::move(repair));

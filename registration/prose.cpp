@@ -144,8 +144,8 @@ std::string steps(Evaluation const& evaluation, Results const& results, Results 
         if (input.need->whole)
             list_whole(text, input);
         else if (!is_numeric(input))
-            text += std::string(input.argument->symbol) + " = " +
-                    cell_text(input.given->cell(row)) + "\n";
+            text +=
+                std::string(input.argument->name) + ": " + cell_text(input.given->cell(row)) + "\n";
         else {
             text += std::string(input.argument->symbol) + " = " + as_read(*input.given, row) + "\n";
             const double si = input.given->si()[input.given->numbers().listed ? row : 0];

@@ -121,10 +121,26 @@ MolarEntropy of_mixing(std::span<const Component> components) {
     refuse_unfit(text::shown(text), std::move(needed), std::move(repair));
 }
 
+/// Whether a substance named without a state is none in the open at room temperature; where only
+/// its gas is tabulated, finding it without a state is refused for that very reason.
+bool is_condensed(std::string_view text) {
+    try {
+        const Phase stable = find_substance(text).phase_at(Temperature::kelvin(298.15));
+        return stable.aggregation() != Aggregation::gas;
+    } catch (Failure const&) {
+        return true;
+    }
+}
+
 Component component(Term const& term, std::string_view whole, Notes const& notes) {
     const Substance gas = find_gas(term.substance, notes);
     if (!gas.is_gas())
         refuse(whole, "gases only, where `" + gas.written() + "` is none", "leave the state out");
+    if (notes.hears_remarks() && is_condensed(term.substance))
+        notes.remark([&] {
+            return gas.written() +
+                   " is taken as an ideal gas; at 298.15 K and 1 bar it is condensed";
+        });
     return {gas, term.coefficient};
 }
 

@@ -90,6 +90,16 @@ TEST(Gases, OfTheTablesStandWhereAHeatCapacityStands) {
               "#VALUE!");
 }
 
+TEST(Gases, RemarkWhatIsNoGasInTheOpen) {
+    const auto why = [](const char* gas) {
+        return text(call("ENTROPY.GAS", {gas, "300 K", "1 bar", "600 K", "5 bar", Range(), "why"}));
+    };
+    EXPECT_EQ(why("0.79 N2 + 0.21 O2"), "ok");
+    EXPECT_EQ(why("H2O(g)"), "ok");
+    EXPECT_NE(why("Fe").find("condensed"), std::string::npos);
+    EXPECT_NE(why("methanol").find("condensed"), std::string::npos);
+}
+
 TEST(Gases, EndWhereTheirEfficiencySays) {
     const Range end = Range(
         text(call("TEMPERATURE.ADIABATIC", {"air", "20 °C", "1 bar", "7 bar", 0.8, "quantity"}))
