@@ -23,6 +23,7 @@ public:
     void remark(Text&& text) const {
         if (remarks_ != nullptr) remarks_->push_back(text());
     }
+    bool hears_steps() const { return steps_ != nullptr; }
     /// Whether it is worth finding out what to remark.
     bool hears_remarks() const { return remarks_ != nullptr; }
 

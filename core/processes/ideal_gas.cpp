@@ -14,13 +14,16 @@ namespace {
 
 using GasHeatCapacity = Positive<MolarHeatCapacity>;
 
-void check_gas(GasHeatCapacity cp) {
-    if (cp.value > gas_constant) return;
+[[noreturn, gnu::cold, gnu::noinline]] void refuse_as_gas(GasHeatCapacity cp) {
     refuse_impossible("cp = " + written(cp.value),
                       "a heat capacity at constant pressure above R = " + written(gas_constant) +
                           ", as every gas has",
                       "check the unit of the heat capacity and that it is the one at constant "
                       "pressure");
+}
+
+void check_gas(GasHeatCapacity cp) {
+    if (!(cp.value > gas_constant)) refuse_as_gas(cp);
 }
 
 /// The two terms of the entropy between two states, cp · ln(T2 / T1) and R · ln(p2 / p1).
@@ -41,9 +44,14 @@ Terms terms(GasHeatCapacity cp, Temperature t1, Positive<Pressure> p1, Temperatu
     return {cp.value * ln_ratio(t2, t1), gas_constant * ln_ratio(p2.value, p1.value)};
 }
 
-void note_terms(Terms const& t, Notes const& notes) {
+/// Apart, so that the relations stay small where nobody listens.
+[[gnu::cold, gnu::noinline]] void tell_terms(Terms const& t, Notes const& notes) {
     notes.step([&] { return "cp · ln(T2 / T1) = " + written(t.heating); });
     notes.step([&] { return "R · ln(p2 / p1) = " + written(t.compression); });
+}
+
+void note_terms(Terms const& t, Notes const& notes) {
+    if (notes.hears_steps()) tell_terms(t, notes);
 }
 
 /// (R / cp) · ln(p2 / p1), which is ln(T2s / T1).
