@@ -3,6 +3,7 @@
 
 #include "core/constants.h"
 #include "core/failure.h"
+#include "core/processes/machine.h"
 #include "core/ratio.h"
 #include "core/substances/heating.h"
 #include "core/substances/stoichiometric_text.h"
@@ -93,20 +94,6 @@ Temperature ideal_end(Gas const& gas, Temperature t1, Positive<Pressure> p1, Pos
     });
     notes.step([&] { return "T2s = " + written(end); });
     return end;
-}
-
-void check_machine(Temperature t1, Positive<Pressure> p1, Temperature t2, Positive<Pressure> p2) {
-    if (p1.value == p2.value)
-        refuse_impossible("p1 = p2 = " + written(p1.value),
-                          "two different pressures, which tell a compressor from a turbine",
-                          "give the pressures before and after the machine");
-    const bool compressor = p2.value > p1.value;
-    if (compressor ? t2 > t1 : t2 < t1) return;
-    refuse_impossible("T1 = " + written(t1) + " and T2 = " + written(t2) +
-                          (compressor ? " where the pressure rises" : " where the pressure falls"),
-                      compressor ? "an end temperature above the first, as compression heats a gas"
-                                 : "an end temperature below the first, as a turbine cools a gas",
-                      "check which state is the one before the machine");
 }
 
 /// -R Σ x ln x.
@@ -287,7 +274,7 @@ Temperature temperature_adiabatic(Gas const& gas, Temperature temperature_1,
 Dimensionless efficiency_isentropic(Gas const& gas, Temperature temperature_1,
                                     Positive<Pressure> pressure_1, Temperature temperature_2,
                                     Positive<Pressure> pressure_2, Notes const& notes) {
-    check_machine(temperature_1, pressure_1, temperature_2, pressure_2);
+    processes::check_machine(temperature_1, pressure_1, temperature_2, pressure_2);
     const Temperature end = ideal_end(gas, temperature_1, pressure_1, pressure_2, notes);
     if (terms(gas, temperature_1, pressure_1, temperature_2, pressure_2, notes).deficit())
         refuse_impossible("T2 = " + written(temperature_2) + " where the ideal step ends at " +

@@ -1,7 +1,6 @@
 // SPDX-License-Identifier: MPL-2.0
+#include "registration/writers/flat_sheet.h"
 #include "registration/writers/words.h"
-
-#include <pugixml.hpp>
 
 #include <fstream>
 #include <iostream>
@@ -21,6 +20,9 @@
 //     ROWS[n]     two columns of n blank rows
 
 namespace {
+
+using registration::writers::add_formula, registration::writers::add_row,
+    registration::writers::add_text, registration::writers::begin_flat_sheet;
 
 struct WrongInput {
     std::string call, error, piece;
@@ -64,16 +66,6 @@ std::string replaced_bracket(std::string text, std::string const& word, Make mak
 
 std::string quoted(std::string const& text) { return '"' + text + '"'; }
 
-pugi::xml_node cell(pugi::xml_node row) { return row.append_child("table:table-cell"); }
-void text_cell(pugi::xml_node row, std::string const& text) {
-    pugi::xml_node node = cell(row);
-    node.append_attribute("office:value-type") = "string";
-    node.append_child("text:p").text() = text.c_str();
-}
-void formula_cell(pugi::xml_node row, std::string const& formula) {
-    cell(row).append_attribute("table:formula") = formula.c_str();
-}
-
 /// What is typed into a cell of its own: F and the columns behind it, of the row.
 std::string with_cells(std::string call, std::size_t row, std::vector<std::string>& typed) {
     call = replaced_bracket(std::move(call), "TYPED", [&](std::string const& text) {
@@ -90,9 +82,9 @@ std::string with_cells(std::string call, std::size_t row, std::vector<std::strin
 
 /// Such a cell in the first row of the sheet; the columns before it are left blank.
 void empty_text_cell(pugi::xml_node row, std::size_t filled) {
-    pugi::xml_node gap = cell(row);
+    pugi::xml_node gap = row.append_child("table:table-cell");
     gap.append_attribute("table:number-columns-repeated") = static_cast<unsigned>(24 - filled);
-    formula_cell(row, "of:=\"\"");
+    add_formula(row, "of:=\"\"");
 }
 
 void add(pugi::xml_node table, WrongInput const& input, std::size_t number) {
@@ -102,29 +94,19 @@ void add(pugi::xml_node table, WrongInput const& input, std::size_t number) {
     const std::string value = replaced_bracket(call, "SHOW", quoted);
     const std::string reason = replaced_bracket(
         call, "SHOW", [](std::string const& show) { return quoted("why in " + show); });
-    pugi::xml_node row = table.append_child("table:table-row");
-    text_cell(row, input.call);
-    formula_cell(row, replaced(value, "SHOW", ""));
-    text_cell(row, input.error);
-    formula_cell(row, replaced(reason, "SHOW", "\"why\""));
-    text_cell(row, input.piece);
-    for (std::string const& text : typed) text_cell(row, text);
+    pugi::xml_node row = add_row(table);
+    add_text(row, input.call);
+    add_formula(row, replaced(value, "SHOW", ""));
+    add_text(row, input.error);
+    add_formula(row, replaced(reason, "SHOW", "\"why\""));
+    add_text(row, input.piece);
+    for (std::string const& text : typed) add_text(row, text);
     if (number == 1) empty_text_cell(row, 5 + typed.size());
 }
 
 void write(std::vector<WrongInput> const& inputs, std::ostream& out) {
     pugi::xml_document document;
-    pugi::xml_node root = document.append_child("office:document");
-    root.append_attribute("xmlns:office") = "urn:oasis:names:tc:opendocument:xmlns:office:1.0";
-    root.append_attribute("xmlns:table") = "urn:oasis:names:tc:opendocument:xmlns:table:1.0";
-    root.append_attribute("xmlns:text") = "urn:oasis:names:tc:opendocument:xmlns:text:1.0";
-    root.append_attribute("xmlns:of") = "urn:oasis:names:tc:opendocument:xmlns:of:1.2";
-    root.append_attribute("office:version") = "1.2";
-    root.append_attribute("office:mimetype") = "application/vnd.oasis.opendocument.spreadsheet";
-    pugi::xml_node table = root.append_child("office:body")
-                               .append_child("office:spreadsheet")
-                               .append_child("table:table");
-    table.append_attribute("table:name") = "Wrong inputs";
+    const pugi::xml_node table = begin_flat_sheet(document, "Wrong inputs");
     std::size_t number = 0;
     for (WrongInput const& input : inputs) add(table, input, ++number);
     document.save(out, " ");
