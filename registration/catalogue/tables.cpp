@@ -65,14 +65,24 @@ std::string phase_names(Substance const& substance) {
     return text;
 }
 
+/// Formula and every name that finds the substance or a phase of it, in small letters.
+std::string searched(std::size_t substance) {
+    std::string text = lowered(substance_rows()[substance].formula);
+    for (Key const& key : names())
+        if (views()[key.view].substance == substance)
+            text.append(" ").append(lowered(key.spelling));
+    return text;
+}
+
 Array substance_list(std::optional<std::string_view> words) {
     Array list(5);
     for (const char* heading : {"formula", "name", "phases", "from / K", "to / K"})
         list.add(std::string(heading));
     const std::string wanted = lowered(words.value_or(""));
-    for (SubstanceRow const& row : substance_rows()) {
+    for (std::size_t at = 0; at < substance_rows().size(); ++at) {
+        SubstanceRow const& row = substance_rows()[at];
+        if (!has_all_words(searched(at), wanted)) continue;
         const Substance substance(views()[row.first_view]);
-        if (!has_all_words(lowered(row.formula) + " " + lowered(row.name), wanted)) continue;
         list.add(std::string(row.formula));
         list.add(std::string(row.name));
         list.add(phase_names(substance));

@@ -18,8 +18,11 @@ need() {
   [ "$(id -u)" -eq 0 ] || fail "These packages are missing; install them as root: apt-get install ${missing[*]}"
   say "    installing ${missing[*]}"
   export DEBIAN_FRONTEND=noninteractive
-  apt-get update -qq >/dev/null || fail "apt-get update failed"
-  apt-get install -y -qq --no-install-recommends "${missing[@]}" >/dev/null 2>&1 || fail "apt-get install failed"
+  local log
+  log="$(mktemp)"
+  { apt-get update -qq && apt-get install -y -qq --no-install-recommends "${missing[@]}"; } >"$log" 2>&1 ||
+    { cat "$log" >&2; fail "The packages could not be installed."; }
+  rm -f "$log"
 }
 
 build_packages=(g++ cmake ninja-build pkg-config libboost-dev libpugixml-dev libreoffice-calc libreoffice-dev)

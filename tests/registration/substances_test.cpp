@@ -179,6 +179,8 @@ TEST(Arrays, ListTheTables) {
     EXPECT_GT(some.rows, 1u);
     EXPECT_LT(some.rows, 10u);
     EXPECT_EQ(some.texts[0], "formula");
+    EXPECT_GT(call("SUBSTANCE.LIST", {"quartz"}).rows, 1u) << "a name of one phase";
+    EXPECT_EQ(call("SUBSTANCE.LIST", {"no such thing"}).rows, 1u);
 }
 
 TEST(Arrays, ShowThePhasesOfIron) {

@@ -146,7 +146,13 @@ private:
 } // namespace
 
 int main(int argc, char** argv) {
-    benchmark::Initialize(&argc, argv);
+    // The ratios are of medians, so there must be some runs to take them of.
+    std::vector<char*> arguments(argv, argv + argc);
+    std::string repetitions = "--benchmark_repetitions=5",
+                aggregates = "--benchmark_report_aggregates_only=true";
+    arguments.insert(arguments.begin() + 1, {repetitions.data(), aggregates.data()});
+    int count = static_cast<int>(arguments.size());
+    benchmark::Initialize(&count, arguments.data());
     Ratios reporter;
     benchmark::RunSpecifiedBenchmarks(&reporter);
     reporter.print();
