@@ -119,7 +119,10 @@ void Evaluation::align_whole_columns() {
     }
     for (std::size_t i = 0; i < overload().needs.size(); ++i) {
         Need const& need = overload().needs[i];
-        if (!need.whole || inputs[i].missing() || need.kind == Need::Kind::table) continue;
+        if (!need.whole || inputs[i].missing() ||
+            ((need.kind == Need::Kind::table || need.kind == Need::Kind::material) ||
+             need.kind == Need::Kind::material))
+            continue;
         if (is_numeric(need, inputs[i]) && !inputs[i].numbers().faults.empty()) {
             RowFault const& fault = inputs[i].numbers().faults.front();
             Failure failure = fault.failure;

@@ -4,6 +4,7 @@
 #include "core/quantities.h"
 #include "core/text/quantity.h"
 #include "registration/molar_mass.h"
+#include "registration/own_material.h"
 
 #include <cctype>
 
@@ -31,7 +32,7 @@ bool is_filled_text(Given const& given) {
 
 /// Substances are told from quantities by how they begin: no number stands in front.
 bool begins_with_letter(Given const& given) {
-    if (!is_filled_text(given)) return false;
+    if (!is_filled_text(given) || means_own_material(given)) return false;
     for (std::size_t row = 0; row < given.cell_count(); ++row)
         if (const std::string_view text = given.cell(row).text; !text.empty())
             return std::isalpha(static_cast<unsigned char>(text[0])) || text[0] == '[' ||
@@ -42,6 +43,24 @@ bool begins_with_letter(Given const& given) {
 /// A mixture begins with a number as a quantity does, and then adds.
 bool is_mixture(Given const& given) {
     return is_filled_text(given) && given.cell(0).text.find(" + ") != std::string_view::npos;
+}
+
+/// One that cannot be read is taken at its word, so that its own reason is told.
+bool is_material_on(core::Dimension heat_capacity, Given const& given) {
+    if (!means_own_material(given)) return false;
+    if (heat_capacity == core::Dimension{}) return true;
+    try {
+        switch (read_own_material(given, core::silent).basis()) {
+        case core::materials::Basis::molar:
+            return heat_capacity == core::dimension<core::MolarHeatCapacity>;
+        case core::materials::Basis::specific:
+            return heat_capacity == core::dimension<core::SpecificHeatCapacity>;
+        case core::materials::Basis::total:
+            return heat_capacity == core::dimension<core::HeatCapacity>;
+        }
+    } catch (Failure const&) {
+    }
+    return true;
 }
 
 bool is_table(Given const& given) {
@@ -115,6 +134,8 @@ bool accepts(Need const& need, Given const& given) {
     case Need::Kind::equation:
         return begins_with_letter(given) ||
                (need.kind == Need::Kind::equation && is_filled_text(given));
+    case Need::Kind::material:
+        return is_material_on(need.dimension, given);
     case Need::Kind::gas:
         return begins_with_letter(given) || is_mixture(given);
     case Need::Kind::named:
@@ -159,6 +180,8 @@ std::string described(Need const& need) {
         return "a chemical formula, or a molar mass";
     case Need::Kind::substance:
         return "a substance by formula or name";
+    case Need::Kind::material:
+        return "an own material: a block under headings, or the text of MATERIAL.OF";
     case Need::Kind::gas:
         return "a gas such as `N2`, or a mixture such as `0.79 N2 + 0.21 O2`";
     case Need::Kind::equation:

@@ -20,6 +20,7 @@ struct Need {
         substance,    ///< a substance of the tables
         gas,          ///< a gas of the tables or a mixture of such
         equation,     ///< a reaction equation
+        material,     ///< an own material of the basis below
         cell,         ///< a cell as it stands
         left_out,     ///< nothing, where other forms of the function take a value
         table,        ///< a rectangle of plain numbers

@@ -3,6 +3,7 @@
 
 #include "core/constants.h"
 #include "core/text/quantity.h"
+#include "registration/own_material.h"
 
 #include <cctype>
 
@@ -141,7 +142,10 @@ std::string steps(Evaluation const& evaluation, Results const& results, Results 
     for (Input const& input : stated_inputs(evaluation)) {
         whole = whole || (input.need->whole &&
                           formula.find(input.argument->symbol) != std::string_view::npos);
-        if (input.need->whole)
+        if (input.need->kind == Need::Kind::material)
+            text += std::string(input.argument->name) + ": " +
+                    read_own_material(*input.given, core::silent).written() + "\n";
+        else if (input.need->whole)
             list_whole(text, input);
         else if (!is_numeric(input))
             text +=

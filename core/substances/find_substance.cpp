@@ -139,7 +139,7 @@ void collect_same_atoms(std::vector<Near>& near, std::string_view text) {
     collect(near, formulas(), base.substr(0, 40));
     std::stable_sort(near.begin(), near.end(),
                      [](Near const& a, Near const& b) { return a.distance < b.distance; });
-    std::string repair = "check the spelling";
+    std::string repair = "check the spelling, or describe it as a material of its own";
     for (std::size_t i = 0; i < std::min<std::size_t>(near.size(), 3); ++i)
         repair += (i == 0 ? "; the nearest are `" : ", `") + std::string(near[i].spelling) + '`';
     refuse_unfit(text::shown(text), "a substance of the tables, see SUBSTANCE.LIST", repair);

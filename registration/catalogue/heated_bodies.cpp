@@ -1,8 +1,10 @@
 // SPDX-License-Identifier: MPL-2.0
+#include "core/materials/material_text.h"
 #include "core/substances/end_states.h"
 #include "core/text/quantity.h"
 #include "registration/catalogue/catalogue.h"
 #include "registration/catalogue/shared_arguments.h"
+#include "registration/material_arguments.h"
 #include "registration/substance_arguments.h"
 
 #include <memory>
@@ -45,6 +47,18 @@ core::Dimensionless share_of_phase(Substance const& substance, Temperature from,
     return fraction_of_phase(substance, from, per_mole(substance, heat, amount), phase, notes);
 }
 
+template<class Basis>
+Temperature own_heated(OwnMaterialOn<Basis> const& own, Temperature from,
+                       core::On<Energy, Basis> heat, LeftOut, Notes const& notes) {
+    return core::materials::temperature_heated<Basis>(*own.material, from, heat, notes);
+}
+template<class Basis>
+Temperature own_heated_amount(OwnMaterialOn<Basis> const& own, Temperature from, Energy heat,
+                              Positive<typename Basis::Amount> amount, Notes const& notes) {
+    return core::materials::temperature_heated<Basis>(*own.material, from, heat / amount.value,
+                                                      notes);
+}
+
 /// Bodies whose materials stand as text: a substance, or a constant heat capacity of the basis the
 /// amounts are given on.
 class Bodies {
@@ -80,6 +94,12 @@ private:
                                        " above 0, on the basis of the amounts",
                                    "give heat capacity and amount both per mole or both per mass");
             materials_.push_back(std::make_unique<ConstantMaterial>(heat_capacity.si));
+        } else if (core::materials::is_material_text(text)) {
+            core::materials::OwnMaterial own = core::materials::read_material(text);
+            core::materials::require(own, std::is_same_v<Amount, Mass>
+                                              ? core::materials::Basis::specific
+                                              : core::materials::Basis::molar);
+            materials_.push_back(std::make_unique<core::materials::OwnMaterial>(std::move(own)));
         } else {
             const Substance substance = find_substance(text);
             if constexpr (std::is_same_v<Amount, Mass>)
@@ -138,10 +158,16 @@ constexpr Entry entries[] = {
         {.name = "TEMPERATURE.HEATED",
          .says = "Temperature at which a substance ends that takes up heat, or gives it off.",
          .arguments = {{substance, start, heat_taken_up, amount_heated, show}},
-         .forms = {form<heated<MolarEnergy, LeftOut>, heated<SpecificEnergy, LeftOut>,
-                        heated<Energy, Positive<AmountOfSubstance>>, heated<Energy, Positive<Mass>>,
-                        heated<Power, Positive<MolarFlow>>, heated<Power, Positive<MassFlow>>>(
-             "Q / n = Σ ∫cp dT + Σ ΔH from T1 to T2, solved for T2", report, at_one_bar)},
+         .forms =
+             {form<heated<MolarEnergy, LeftOut>, heated<SpecificEnergy, LeftOut>,
+                   heated<Energy, Positive<AmountOfSubstance>>, heated<Energy, Positive<Mass>>,
+                   heated<Power, Positive<MolarFlow>>, heated<Power, Positive<MassFlow>>>(
+                  "Q / n = Σ ∫cp dT + Σ ΔH from T1 to T2, solved for T2", report, at_one_bar),
+              form<own_heated<core::Molar>, own_heated<core::Specific>, own_heated<core::Total>,
+                   own_heated_amount<core::Molar>, own_heated_amount<core::Specific>>(
+                  "Q / n = Σ ∫cp dT + Σ ΔH from T1 to T2, solved for T2",
+                  "the material as described in the sheet",
+                  "the range of the material; nothing is extrapolated")},
          .examples = {{{"TEMPERATURE.HEATED(\"Al\"; \"25 °C\"; \"25 kJ/mol\"; ; \"K\")",
                         933.61}}}}),
     describe(

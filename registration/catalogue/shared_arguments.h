@@ -27,10 +27,12 @@ inline constexpr Argument constant_cp{
     .symbol = "cp",
     .says = "a gas or mixture of the tables, or a molar heat capacity at constant pressure",
     .example = "29.1 J/(mol·K)"};
-inline constexpr Argument substance{.name = "substance",
-                                    .symbol = "substance",
-                                    .says = "formula or common name, with or without a state",
-                                    .example = "Fe"};
+inline constexpr Argument substance{
+    .name = "substance",
+    .symbol = "substance",
+    .says =
+        "formula or common name, with or without a state; some functions take own materials too",
+    .example = "Fe"};
 inline constexpr Argument temperature{
     .name = "temperature", .symbol = "T", .says = "temperature", .example = "600 °C"};
 /// The published tables that functions of substances draw on.

@@ -1,8 +1,10 @@
 // SPDX-License-Identifier: MPL-2.0
+#include "core/materials/material_text.h"
 #include "core/substances/heating.h"
 #include "core/substances/reaction.h"
 #include "registration/catalogue/catalogue.h"
 #include "registration/catalogue/shared_arguments.h"
+#include "registration/material_arguments.h"
 #include "registration/substance_arguments.h"
 
 namespace registration {
@@ -55,6 +57,35 @@ core::MolarEnergy gibbs_at_activities(Reaction const& reaction, Temperature temp
     return gibbs_of_reaction(reaction, temperature, activities.values, notes);
 }
 
+template<class Basis>
+core::On<core::Entropy, Basis> own_entropy_of_heating(OwnMaterialOn<Basis> const& own,
+                                                      Temperature from, Temperature to,
+                                                      Notes const& notes) {
+    return core::materials::entropy_of_heating<Basis>(*own.material, from, to, notes);
+}
+template<class Basis>
+core::On<core::Energy, Basis> own_enthalpy_of_heating(OwnMaterialOn<Basis> const& own,
+                                                      Temperature from, Temperature to,
+                                                      Notes const& notes) {
+    return core::materials::enthalpy_of_heating<Basis>(*own.material, from, to, notes);
+}
+template<class Basis>
+core::On<core::HeatCapacity, Basis> own_heat_capacity(OwnMaterialOn<Basis> const& own,
+                                                      Temperature temperature, Notes const& notes) {
+    return core::materials::heat_capacity<Basis>(*own.material, temperature, notes);
+}
+std::string material_of(AnyOwnMaterial const& own, std::optional<std::string_view> name,
+                        std::optional<core::Positive<core::MolarMass>> molar_mass) {
+    core::materials::OwnMaterial material = *own.material;
+    if (name) material.set_name(*name);
+    if (molar_mass) material.set_molar_mass(molar_mass->value);
+    return core::materials::write_material(material);
+}
+
+constexpr const char* own_data =
+    "the material as described in the sheet; measured tables by the monotone cubic of F. N. "
+    "Fritsch, J. Butland, SIAM J. Sci. Stat. Comput. 5 (1984) 300";
+constexpr const char* own_valid = "the range of the material; nothing is extrapolated";
 constexpr Argument equation{.name = "equation",
                             .symbol = "equation",
                             .says = "balanced reaction equation, states where they matter",
@@ -70,23 +101,35 @@ constexpr Entry entries[] = {
                  "transition on the way passed; cooling is the negative.",
          .arguments = {{substance, from_temperature, to_temperature, amount, show}},
          .forms = {form<entropy_of_heating>(
-             "ΔS = Σ ∫cp/T dT + Σ ΔH/T, over the stretches and transitions from T1 to T2", report,
-             phases_passed)},
+                       "ΔS = Σ ∫cp/T dT + Σ ΔH/T, over the stretches and transitions from T1 to T2",
+                       report, phases_passed),
+                   form<own_entropy_of_heating<core::Molar>, own_entropy_of_heating<core::Specific>,
+                        own_entropy_of_heating<core::Total>>(
+                       "ΔS = Σ ∫cp/T dT + Σ ΔH/T, over the rows and transitions from T1 to T2",
+                       own_data, own_valid)},
          .examples = {{{"ENTROPY.HEATING(\"N2\"; \"298.15 K\"; \"1000 K\")", 36.56097979501541}}}}),
-    describe({.name = "ENTHALPY.HEATING",
-              .says =
-                  "Heat taken up by a substance with variable heat capacity at constant pressure, "
-                  "transitions included.",
-              .arguments = {{substance, from_temperature, to_temperature, amount, show}},
-              .forms = {form<enthalpy_of_heating>(
+    describe(
+        {.name = "ENTHALPY.HEATING",
+         .says = "Heat taken up by a substance with variable heat capacity at constant pressure, "
+                 "transitions included.",
+         .arguments = {{substance, from_temperature, to_temperature, amount, show}},
+         .forms =
+             {form<enthalpy_of_heating>(
                   "ΔH = Σ ∫cp dT + Σ ΔH, over the stretches and transitions from T1 to T2", report,
-                  phases_passed)},
-              .examples = {{{"ENTHALPY.HEATING(\"N2\"; \"298.15 K\"; \"1000 K\"; ; \"kJ/mol\")",
-                             21.462274589345895}}}}),
+                  phases_passed),
+              form<own_enthalpy_of_heating<core::Molar>, own_enthalpy_of_heating<core::Specific>,
+                   own_enthalpy_of_heating<core::Total>>(
+                  "ΔH = Σ ∫cp dT + Σ ΔH, over the rows and transitions from T1 to T2", own_data,
+                  own_valid)},
+         .examples = {{{"ENTHALPY.HEATING(\"N2\"; \"298.15 K\"; \"1000 K\"; ; \"kJ/mol\")",
+                        21.462274589345895}}}}),
     describe({.name = "HEAT.CAPACITY",
               .says = "Heat capacity at constant pressure of a substance.",
               .arguments = {{substance, temperature, show}},
-              .forms = {form<heat_capacity>("cp of the stable phase at T", report, phases_passed)},
+              .forms = {form<heat_capacity>("cp of the stable phase at T", report, phases_passed),
+                        form<own_heat_capacity<core::Molar>, own_heat_capacity<core::Specific>,
+                             own_heat_capacity<core::Total>>("cp of the material at T", own_data,
+                                                             own_valid)},
               .examples = {{{"HEAT.CAPACITY(\"N2\"; \"400 K\")", 29.24872456918585}}}}),
     describe({.name = "ENTROPY.STANDARD",
               .says = "Absolute entropy of a substance at 1 bar; of a gas at another pressure "
@@ -160,6 +203,25 @@ constexpr Entry entries[] = {
                         show}},
          .forms = {form<equilibrium_temperature>("ΔG°(T) = 0, solved for T", report, of_equation)},
          .examples = {{{"EQUILIBRIUM.TEMPERATURE(\"CaCO3 -> CaO + CO2\")", 1159.0883711190586}}}}),
+    describe(
+        {.name = "MATERIAL.OF",
+         .says =
+             "An own material as the text of one cell, to be used where a substance is asked for.",
+         .arguments = {{{.name = "block",
+                         .symbol = "block",
+                         .says = "a measured table or a correlation under headings with units",
+                         .example = "B4:C20"},
+                        {.name = "name",
+                         .symbol = "name",
+                         .says = "a name for steps and notes",
+                         .example = "steel A"},
+                        {.name = "molar_mass",
+                         .symbol = "M",
+                         .says = "what a mole of it weighs",
+                         .example = "55.8 g/mol"}}},
+         .forms = {form<material_of>("the block as one text, all digits kept", own_data)},
+         .examples = {{{"MATERIAL.OF({\"T / K\";\"cp / (J/(kg·K))\"|300;460|400;480}; \"steel A\")",
+                        0, "material \"steel A\" | T / K: 300 400 | cp / (J/(kg·K)): 460 480"}}}}),
 };
 
 } // namespace

@@ -56,6 +56,7 @@ constexpr const char* contract[] = {
     "GIBBS.REACTION(equation; temperature; activities; show)",
     "EQUILIBRIUM.CONSTANT(equation; temperature; show)",
     "EQUILIBRIUM.TEMPERATURE(equation; from; to; show)",
+    "MATERIAL.OF(block; name; molar_mass)",
     "SUBSTANCE.LIST(words)",
     "SUBSTANCE.PHASES(substance)",
     "CURVE.HEATING(substance; from; to; points; units)",

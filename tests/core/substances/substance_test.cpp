@@ -86,7 +86,7 @@ TEST(Substance, IsRefusedWithTheNearest) {
     expect_repair("aluminia", "`alumina`");
     expect_repair("fe2O3", "`Fe2O3`");
     expect_repair("C2H6O", "`ethanol`");
-    expect_repair("Fe3C", "check the spelling");
+    expect_repair("Fe3C", "material of its own");
     expect_repair("steam", "ENTROPY.STEAM");
     expect_repair("C4H10", "`butane` or `isobutane`");
     expect_repair("methanol", "write `methanol(g)`");
