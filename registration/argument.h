@@ -90,65 +90,52 @@ struct argument<core::Temperature> : Unchecked {
     };
 };
 
-template<class Q>
-struct argument<core::Positive<Q>> : Unchecked {
+/// A number on which a condition stands: T wraps a Number that the Condition holds for.
+template<class T, class Number, class Condition>
+struct conditioned : Unchecked {
     static constexpr Need need = [] {
-        Need n = argument<Q>::need;
-        n.condition = "above 0";
+        Need n = argument<Number>::need;
+        n.condition = Condition::words;
         return n;
     }();
     struct Rows : NumberRows {
         using NumberRows::NumberRows;
-        core::Positive<Q> operator[](std::size_t row) const {
+        T operator[](std::size_t row) const {
             const double value = number(row);
-            if (!(value > 0)) refuse(row, need.condition);
-            return {Q::from_value(value)};
+            if (!Condition::holds(value)) refuse(row, Condition::words);
+            if constexpr (std::is_same_v<Number, double>)
+                return {value};
+            else
+                return {Number::from_value(value)};
         }
     };
 };
 
-template<>
-struct argument<core::Fraction> : Unchecked {
-    static constexpr Need need{.condition = "from 0 to 1"};
-    struct Rows : NumberRows {
-        using NumberRows::NumberRows;
-        core::Fraction operator[](std::size_t row) const {
-            const double value = number(row);
-            if (!(value >= 0 && value <= 1)) refuse(row, need.condition);
-            return {value};
-        }
-    };
+struct AboveZero {
+    static constexpr const char* words = "above 0";
+    static bool holds(double value) { return value > 0; }
+};
+struct ZeroOrMore {
+    static constexpr const char* words = "of 0 or more";
+    static bool holds(double value) { return value >= 0; }
+};
+struct FromZeroToOne {
+    static constexpr const char* words = "from 0 to 1";
+    static bool holds(double value) { return value >= 0 && value <= 1; }
+};
+struct AboveZeroUpToOne {
+    static constexpr const char* words = "above 0 and up to 1";
+    static bool holds(double value) { return value > 0 && value <= 1; }
 };
 
 template<class Q>
-struct argument<core::NonNegative<Q>> : Unchecked {
-    static constexpr Need need = [] {
-        Need n = argument<Q>::need;
-        n.condition = "of 0 or more";
-        return n;
-    }();
-    struct Rows : NumberRows {
-        using NumberRows::NumberRows;
-        core::NonNegative<Q> operator[](std::size_t row) const {
-            const double value = number(row);
-            if (!(value >= 0)) refuse(row, need.condition);
-            return {Q::from_value(value)};
-        }
-    };
-};
-
+struct argument<core::Positive<Q>> : conditioned<core::Positive<Q>, Q, AboveZero> {};
+template<class Q>
+struct argument<core::NonNegative<Q>> : conditioned<core::NonNegative<Q>, Q, ZeroOrMore> {};
 template<>
-struct argument<core::Efficiency> : Unchecked {
-    static constexpr Need need{.condition = "above 0 and up to 1"};
-    struct Rows : NumberRows {
-        using NumberRows::NumberRows;
-        core::Efficiency operator[](std::size_t row) const {
-            const double value = number(row);
-            if (!(value > 0 && value <= 1)) refuse(row, need.condition);
-            return {value};
-        }
-    };
-};
+struct argument<core::Fraction> : conditioned<core::Fraction, double, FromZeroToOne> {};
+template<>
+struct argument<core::Efficiency> : conditioned<core::Efficiency, double, AboveZeroUpToOne> {};
 
 template<>
 struct argument<core::GaugePressure> : Unchecked {
