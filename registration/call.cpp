@@ -34,7 +34,7 @@ Basis agree_with_unit(Evaluation const& evaluation, Show const& show) {
     Basis basis = Basis::same;
     if (unit.dimension != outcome.dimension) {
         const core::Dimension molar_mass = core::dimension<core::MolarMass>;
-        const bool known = evaluation.molar_mass(0).has_value();
+        const bool known = evaluation.names_substance();
         if (known && outcome.dimension == unit.dimension * molar_mass)
             basis = Basis::per_mass_from_mole;
         else if (known && outcome.dimension * molar_mass == unit.dimension)
@@ -61,12 +61,6 @@ Basis agree_with_unit(Evaluation const& evaluation, Show const& show) {
         refuse_show(evaluation.entry(), "the unit " + asked,
                     "a unit of the kind of fraction that was given", "ask for `1` or `%`");
     return basis;
-}
-
-double on_basis(double value, Basis basis, Evaluation const& evaluation, std::size_t row) {
-    if (basis == Basis::same) return value;
-    const double molar_mass = *evaluation.molar_mass(row);
-    return basis == Basis::per_mass_from_mole ? value / molar_mass : value * molar_mass;
 }
 
 /// Unit and unit text of the result: as asked for, or coherent SI.
@@ -97,7 +91,9 @@ class Call {
 public:
     Call(Entry const& entry, Arguments& arguments, Show const& show)
         : entry_(entry), show_(show), evaluation_(entry, arguments),
-          target_(target_of(evaluation_, show)) {}
+          target_(target_of(evaluation_, show)),
+          molar_masses_(target_.basis == Basis::same ? MolarMasses{} : evaluation_.molar_masses()) {
+    }
 
     Answer answer() {
         if (show_.is_prose()) return prose();
@@ -122,9 +118,17 @@ private:
         return answer;
     }
 
-    double converted(Results const& results, std::size_t row) const {
-        return target_.unit.from_si(
-            on_basis(results.numbers[row], target_.basis, evaluation_, row));
+    /// A value of a row that has neither failed nor is blank, on the basis that was asked for.
+    double on_basis(double value, std::size_t row) const {
+        switch (target_.basis) {
+        case Basis::same:
+            return value;
+        case Basis::per_mass_from_mole:
+            return value / molar_masses_(row);
+        case Basis::per_mole_from_mass:
+            return value * molar_masses_(row);
+        }
+        return value;
     }
 
     Answer numbers(Results results) {
@@ -133,9 +137,12 @@ private:
             answer.numbers = std::move(results.numbers);
             return spread(std::move(answer));
         }
-        for (std::size_t row = 0; row < results.count(); ++row)
+        for (std::size_t row = 0; row < results.count(); ++row) {
+            if (evaluation_.blank(row)) continue;
+            const double si = results.numbers[row];
             answer.numbers[row] =
-                results.failed(row) ? results.numbers[row] : converted(results, row);
+                results.failed(row) ? si : target_.unit.from_si(on_basis(si, row));
+        }
         return spread(std::move(answer));
     }
 
@@ -146,15 +153,18 @@ private:
             shaped(results.count(), number ? Answer::Kind::numbers : Answer::Kind::texts);
         for (std::size_t row = 0; row < results.count(); ++row) {
             if (evaluation_.blank(row)) continue;
-            const double bad = results.failed(row) ? results.numbers[row]
-                               : u[row] != u[row]  ? u[row]
-                                                   : 0;
-            const double si = on_basis(results.numbers[row], target_.basis, evaluation_, row);
-            const double spread = on_basis(u[row], target_.basis, evaluation_, row);
+            const double bad = results.failed(row) ? results.numbers[row] : u[row];
+            if (bad != bad) { // an error, of the result or of its uncertainty
+                if (number)
+                    answer.numbers[row] = bad;
+                else
+                    answer.errors.push_back({row, bad});
+                continue;
+            }
+            const double si = on_basis(results.numbers[row], row);
+            const double spread = on_basis(u[row], row);
             if (number)
-                answer.numbers[row] = bad != bad ? bad : target_.unit.span_from_si(spread);
-            else if (bad != bad)
-                answer.errors.push_back({row, bad});
+                answer.numbers[row] = target_.unit.span_from_si(spread);
             else
                 answer.texts[row] =
                     show_.view == View::quantity
@@ -241,6 +251,7 @@ private:
     Show const& show_;
     Evaluation evaluation_;
     Target target_;
+    MolarMasses molar_masses_; ///< where the target is on another basis
 };
 
 Answer failed(Entry const& entry, Failure const& failure, bool explain) {

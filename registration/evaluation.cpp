@@ -236,22 +236,25 @@ void Evaluation::mark_rows() {
     }
 }
 
-std::optional<double> Evaluation::molar_mass(std::size_t row) const {
+bool Evaluation::names_substance() const {
     for (std::size_t i = 0; i < overload().needs.size(); ++i)
         if (knows_molar_mass(overload().needs[i].kind) && !arguments_.inputs[i].missing())
-            return molar_mass_of(overload().needs[i].kind, arguments_.inputs[i], row);
-    return std::nullopt;
+            return true;
+    return false;
 }
 
-/// The molar masses of all rows; a substance that stands for all of them is looked up once.
 MolarMasses Evaluation::molar_masses() const {
     for (std::size_t i = 0; i < overload().needs.size(); ++i) {
         Need const& need = overload().needs[i];
         Given const& given = arguments_.inputs[i];
         if (!knows_molar_mass(need.kind) || given.missing()) continue;
-        if (count_of(need, given) == 1)
+        if (count_of(need, given) > 1) return {0, &given, need.kind};
+        try {
             return {molar_mass_of(need.kind, given, 0), nullptr, need.kind};
-        return {0, &given, need.kind};
+        } catch (Failure& failure) {
+            failure.argument = static_cast<int>(i);
+            throw;
+        }
     }
     return {};
 }
@@ -278,7 +281,7 @@ void Evaluation::weigh_amount() {
             bridge_ = Bridge::over_molar_mass;
         else if (is_extensive(product * molar_mass_dimension))
             bridge_ = Bridge::times_molar_mass;
-        const bool known = molar_mass(0).has_value();
+        const bool known = names_substance();
         if (bridge_ == Bridge::none || !known)
             refuse(outcome_.dimension.amount == -1
                        ? "an amount in mol, since the result is molar"

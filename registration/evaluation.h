@@ -22,7 +22,8 @@ struct Arguments {
     std::span<const Given> given() const { return {inputs.data(), inputs.size()}; }
 };
 
-/// What a mole weighs, in every row.
+/// What a mole weighs, in every row. A row whose substance is not known throws its Failure: rows that
+/// have failed already are not asked.
 struct MolarMasses {
     double only = 0;
     Given const* given = nullptr; ///< a column of substances, or null where one stands for all
@@ -58,8 +59,9 @@ public:
     bool has_blanks() const { return !states_.empty(); }
     bool blank(std::size_t row) const { return !states_.empty() && states_[row] == State::blank; }
     std::vector<std::size_t> const& blanks_of_first() const { return blanks_of_first_; }
-    /// What a mole of the substance of a row weighs, where the call names a substance.
-    std::optional<double> molar_mass(std::size_t row) const;
+    /// Whether the call names a substance, gas or mixture, whose mole then has a mass.
+    bool names_substance() const;
+    /// What a mole weighs in every row; a substance that stands for all of them is looked up once.
     MolarMasses molar_masses() const;
     Entry const& entry() const { return entry_; }
     Arguments const& arguments() const { return arguments_; }

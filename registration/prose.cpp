@@ -165,8 +165,10 @@ std::string steps(Evaluation const& evaluation, Results const& results, Results 
         text += std::string(symbol) + " = " +
                 result_text(per_amount, row, evaluation.overload().outcome) + "\n";
         text += std::string("n = ") + as_read(amount, row) + "\n";
-        if (const auto molar_mass = evaluation.molar_mass(row))
-            text += "M = " + in_si(*molar_mass, core::dimension<core::MolarMass>) + "\n";
+        if (evaluation.names_substance() && !results.failed(row))
+            text +=
+                "M = " + in_si(evaluation.molar_masses()(row), core::dimension<core::MolarMass>) +
+                "\n";
         text += std::string(symbol) + " · n = " + result_text(results, row, evaluation.outcome());
     } else {
         text += std::string(symbol) + " = " + result_text(results, row, evaluation.outcome());

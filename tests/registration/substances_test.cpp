@@ -44,6 +44,36 @@ TEST(Substances, ColumnsLookAtTheSubstanceOnceOrRowByRow) {
     EXPECT_EQ(text(each, 1), "#VALUE!");
 }
 
+TEST(Substances, ABadOneSpoilsNoNeighbourWhereMolesAndMassesMeet) {
+    const Range column = Range::column({"Xx", "Fe", "Al"});
+    const auto heated = [&](Range amount, Range show) {
+        return call("ENTROPY.HEATING",
+                    {column, "25 °C", "600 °C", std::move(amount), std::move(show)});
+    };
+    for (const Answer& answer : {heated("2 kg", Range()), heated(Range(), "kJ/(kg·K)"),
+                                 heated(Range(), "uncertainty in kJ/(kg·K)"),
+                                 heated("2 kg", "text"), heated(Range(), "text in kJ/(kg·K)")}) {
+        ASSERT_EQ(answer.rows, 3u);
+        EXPECT_EQ(text(answer, 0), "#VALUE!");
+        EXPECT_FALSE(text(answer, 1).starts_with("#")) << text(answer, 1);
+        EXPECT_FALSE(text(answer, 2).starts_with("#")) << text(answer, 2);
+    }
+    for (const char* view : {"steps", "why", "source"}) {
+        const Answer answer = heated("2 kg", view);
+        ASSERT_EQ(answer.rows, 3u) << view;
+        EXPECT_FALSE(text(answer, 2).starts_with("#")) << view;
+    }
+}
+
+TEST(Substances, ABlankRowStaysBlankOnAnotherBasis) {
+    const Answer answer =
+        call("HEAT.CAPACITY", {Range::column({"Fe", Range::blank(), "Al"}),
+                               Range::column({"500 K", Range::blank(), "500 K"}), "kJ/(kg·K)"});
+    ASSERT_EQ(answer.rows, 3u);
+    EXPECT_EQ(text(answer, 1), "");
+    EXPECT_GT(answer.numbers[2], 0.9);
+}
+
 TEST(Substances, StepsListTheStretches) {
     const std::string steps =
         text(call("ENTROPY.HEATING", {"Al", "25 °C", "720 °C", Range(), "steps"}));
