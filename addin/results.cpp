@@ -41,7 +41,8 @@ Any cell(Answer const& answer, std::size_t at) {
     if (std::ranges::binary_search(answer.blanks, at)) return Any(OUString());
     const auto error = std::ranges::lower_bound(answer.errors, at, {}, &Answer::Error::cell);
     if (error != answer.errors.end() && error->cell == at) return Any(error->number);
-    if (answer.kind == Answer::Kind::numbers || (answer.kind == Answer::Kind::cells && answer.texts[at].empty()))
+    if (answer.kind == Answer::Kind::numbers ||
+        (answer.kind == Answer::Kind::cells && answer.texts[at].empty()))
         return Any(answer.numbers[at]);
     return Any(to_office(answer.texts[at]));
 }

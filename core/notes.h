@@ -7,13 +7,15 @@
 namespace core {
 
 /// Where a relation leaves what a reader may want to see besides the result. A step is a line of
-/// the derivation; a remark is what should be known about a result that stands. Texts are given as
-/// functions, so that nothing is built when nobody listens.
+/// the derivation; a remark is what should be known about a result that stands; an uncertainty is the
+/// standard uncertainty that published data leave the result, in its SI unit, independent of others.
+/// All are given as functions, so that nothing is built when nobody listens.
 class Notes {
 public:
     constexpr Notes() = default;
-    constexpr Notes(std::vector<std::string>* steps, std::vector<std::string>* remarks)
-        : steps_(steps), remarks_(remarks) {}
+    constexpr Notes(std::vector<std::string>* steps, std::vector<std::string>* remarks,
+                    double* variance = nullptr)
+        : steps_(steps), remarks_(remarks), variance_(variance) {}
 
     template<class Text>
     void step(Text&& text) const {
@@ -23,6 +25,10 @@ public:
     void remark(Text&& text) const {
         if (remarks_ != nullptr) remarks_->push_back(text());
     }
+    template<class StandardUncertainty>
+    void uncertainty(StandardUncertainty&& u) const {
+        if (variance_ != nullptr) *variance_ += u() * u();
+    }
     bool hears_steps() const { return steps_ != nullptr; }
     /// Whether it is worth finding out what to remark.
     bool hears_remarks() const { return remarks_ != nullptr; }
@@ -30,6 +36,7 @@ public:
 private:
     std::vector<std::string>* steps_ = nullptr;
     std::vector<std::string>* remarks_ = nullptr;
+    double* variance_ = nullptr;
 };
 
 /// For callers without a listener.

@@ -3,6 +3,7 @@
 
 #include "core/text/quantity.h"
 #include "registration/molar_mass.h"
+#include "registration/uncertain_places.h"
 
 #include <algorithm>
 #include <cmath>
@@ -30,12 +31,20 @@ bool is_numeric(Need const& need, Given const& given) {
     return need.kind == Need::Kind::quantity || need.kind == Need::Kind::any_quantity;
 }
 
+/// Whether figures of the tables stand behind an argument.
+bool is_of_tables(Need const& need) {
+    return need.kind == Need::Kind::substance || need.kind == Need::Kind::gas ||
+           need.kind == Need::Kind::equation;
+}
+
 std::size_t count_of(Need const& need, Given const& given) {
-    return is_numeric(need, given) ? given.numbers().count() : given.cell_count();
+    if (is_numeric(need, given)) return given.numbers().count();
+    return stands_for_all_rows(need, given) ? 1 : given.cell_count();
 }
 
 bool across_of(Need const& need, Given const& given) {
-    return is_numeric(need, given) ? given.numbers().across : given.cells_across();
+    if (is_numeric(need, given)) return given.numbers().across;
+    return !stands_for_all_rows(need, given) && given.cells_across();
 }
 
 bool is_blank(Need const& need, Given const& given, std::size_t row) {
@@ -119,9 +128,8 @@ void Evaluation::align_whole_columns() {
     }
     for (std::size_t i = 0; i < overload().needs.size(); ++i) {
         Need const& need = overload().needs[i];
-        if (!need.whole || inputs[i].missing() ||
-            ((need.kind == Need::Kind::table || need.kind == Need::Kind::material) ||
-             need.kind == Need::Kind::material))
+        if (!need.whole || inputs[i].missing() || need.kind == Need::Kind::table ||
+            need.kind == Need::Kind::material)
             continue;
         if (is_numeric(need, inputs[i]) && !inputs[i].numbers().faults.empty()) {
             RowFault const& fault = inputs[i].numbers().faults.front();
@@ -293,27 +301,43 @@ void Evaluation::weigh_amount() {
                                                                : product;
 }
 
-void Evaluation::multiply(Results& results) const {
+/// What a row's result is multiplied by; throws where the amount is below zero.
+double Evaluation::amount_factor(std::size_t row, MolarMasses const& masses) const {
     Given const& given = arguments_.amount;
-    const std::size_t stride = given.numbers().listed ? 1 : 0;
-    const double* amounts = given.si();
-    const MolarMasses masses = bridge_ == Bridge::none ? MolarMasses{} : molar_masses();
+    const std::size_t at = given.numbers().listed ? row : 0;
+    const double amount = given.si()[at];
+    if (!(amount >= 0)) {
+        Failure failure(Failure::Kind::impossible, written(given.block(), at),
+                        "an amount of 0 or more",
+                        "check the sign, and let the order of the other arguments say which "
+                        "way the change goes");
+        failure.argument = static_cast<int>(arguments_.inputs.size());
+        throw failure;
+    }
+    switch (bridge_) {
+    case Bridge::none:
+        break;
+    case Bridge::over_molar_mass:
+        return amount / masses(row);
+    case Bridge::times_molar_mass:
+        return amount * masses(row);
+    }
+    return amount;
+}
+
+MolarMasses Evaluation::bridging_masses() const {
+    return bridge_ == Bridge::none ? MolarMasses{} : molar_masses();
+}
+
+void Evaluation::multiply(Results& results) const {
+    const MolarMasses masses = bridging_masses();
     for (std::size_t row = 0; row < results.numbers.size(); ++row) {
         if (results.failed(row) || (!states_.empty() && states_[row] != State::good)) continue;
-        const double amount = amounts[row * stride];
-        if (!(amount >= 0)) {
-            Failure failure(Failure::Kind::impossible, written(given.block(), row * stride),
-                            "an amount of 0 or more",
-                            "check the sign, and let the order of the other arguments say which "
-                            "way the change goes");
-            failure.argument = static_cast<int>(arguments_.inputs.size());
+        try {
+            results.put(row, results.numbers[row] * amount_factor(row, masses));
+        } catch (Failure& failure) {
             results.fail(row, std::move(failure));
-            continue;
         }
-        double value = results.numbers[row] * amount;
-        if (bridge_ == Bridge::over_molar_mass) value /= masses(row);
-        if (bridge_ == Bridge::times_molar_mass) value *= masses(row);
-        results.put(row, value);
     }
 }
 
@@ -343,8 +367,7 @@ Results Evaluation::results_without_amount(core::Notes const& notes, bool explai
 }
 
 template<class Move>
-void Evaluation::add_variance(std::vector<double>& variance, Results const& nominal, Given& given,
-                              bool& one_sided, Move move) {
+void Evaluation::add_variance(Variances& variances, Given& given, Move move) {
     const auto moved = [&](double times) {
         move(given, times);
         Results result = results(core::silent, false);
@@ -352,49 +375,85 @@ void Evaluation::add_variance(std::vector<double>& variance, Results const& nomi
         return result;
     };
     const Results plus = moved(1), minus = moved(-1);
-    for (std::size_t row = 0; row < variance.size(); ++row) {
-        if (nominal.failed(row)) continue;
+    for (std::size_t row = 0; row < variances.of_rows.size(); ++row) {
+        if (variances.nominal.failed(row)) continue;
         const bool up = !plus.failed(row), down = !minus.failed(row);
-        const double value = nominal.numbers[row];
+        const double value = variances.nominal.numbers[row];
         const double half = up && down ? (plus.numbers[row] - minus.numbers[row]) / 2
                             : up       ? plus.numbers[row] - value
                             : down     ? value - minus.numbers[row]
                                        : error_number(Failure::Kind::impossible);
-        one_sided = one_sided || up != down;
-        variance[row] = half == half ? variance[row] + half * half : half;
+        variances.one_sided = variances.one_sided || up != down;
+        double& variance = variances.of_rows[row];
+        variance = half == half ? variance + half * half : half;
+    }
+}
+
+void Evaluation::count_inputs(std::size_t count) {
+    if (count > most_uncertain_inputs)
+        core::refuse_impossible("more than 1000 inputs with an uncertainty",
+                                "at most 1000 of them a result",
+                                "balance parts of the plant first");
+}
+
+/// Moves a column of numbers: all rows together, or one by one where they are one argument.
+void Evaluation::move_numbers(Given& given, bool whole, Variances& variances) {
+    if (!given.numbers().uncertain()) return;
+    if (!whole) {
+        add_variance(variances, given, [](Given& g, double times) { g.move_all(times); });
+        return;
+    }
+    for (std::size_t row = 0; row < given.numbers().u.size(); ++row) {
+        if (given.numbers().u[row] == 0) continue;
+        count_inputs(++variances.inputs);
+        add_variance(variances, given, [row](Given& g, double times) { g.move_one(row, times); });
+    }
+}
+
+void Evaluation::move_places(Given& given, Need const& need, Variances& variances) {
+    for (Place const& place : uncertain_places(need, given)) {
+        count_inputs(++variances.inputs);
+        add_variance(variances, given, [&](Given& g, double times) { g.move_place(place, times); });
+    }
+}
+
+/// What published data leave uncertain, told by the relation itself row by row.
+void Evaluation::add_uncertainty_of_data(Variances& variances) const {
+    if (std::ranges::none_of(overload().needs, [](Need const& need) { return is_of_tables(need); }))
+        return;
+    const MolarMasses masses = bridging_masses();
+    Results scratch(overload().outcome, rows_, false);
+    for (std::size_t row = 0; row < variances.of_rows.size() && row < rows_; ++row) {
+        if (variances.nominal.failed(row) || (!states_.empty() && states_[row] != State::good))
+            continue;
+        double variance = 0;
+        overload().run(arguments_.given(), row, row + 1, scratch, {nullptr, nullptr, &variance});
+        if (variance == 0) continue;
+        const double factor = arguments_.amount.missing() ? 1 : amount_factor(row, masses);
+        variances.of_rows[row] += variance * factor * factor;
     }
 }
 
 std::vector<double> Evaluation::uncertainties(Results const& nominal,
                                               std::vector<std::string>* remarks) {
-    std::vector<double> variance(nominal.numbers.size(), 0.0);
-    if (outcome_.kind == Outcome::Kind::text) return variance;
-    bool one_sided = false;
-    std::size_t inputs = 0;
-    const auto move_input = [&](Given& given, bool whole) {
-        Numbers const* numbers = given.missing() ? nullptr : given.if_numbers();
-        if (!numbers || !numbers->uncertain()) return;
-        if (!whole)
-            return add_variance(variance, nominal, given, one_sided,
-                                [](Given& g, double times) { g.move_all(times); });
-        for (std::size_t row = 0; row < numbers->u.size(); ++row) {
-            if (numbers->u[row] == 0) continue;
-            if (++inputs > most_uncertain_inputs)
-                core::refuse_impossible("more than 1000 inputs with an uncertainty",
-                                        "at most 1000 of them a result",
-                                        "balance parts of the plant first");
-            add_variance(variance, nominal, given, one_sided,
-                         [row](Given& g, double times) { g.move_one(row, times); });
-        }
-    };
-    for (std::size_t i = 0; i < overload().needs.size(); ++i)
-        move_input(arguments_.inputs[i], overload().needs[i].whole);
-    if (!arguments_.amount.missing()) move_input(arguments_.amount, false);
-    if (one_sided && remarks)
+    Variances variances{nominal, std::vector<double>(nominal.numbers.size(), 0.0)};
+    if (outcome_.kind != Outcome::Kind::number) return variances.of_rows;
+    for (std::size_t i = 0; i < overload().needs.size(); ++i) {
+        Need const& need = overload().needs[i];
+        Given& given = arguments_.inputs[i];
+        if (given.missing()) continue;
+        if (is_numeric(need, given))
+            move_numbers(given, need.whole, variances);
+        else
+            move_places(given, need, variances);
+    }
+    if (!arguments_.amount.missing()) move_numbers(arguments_.amount, false, variances);
+    add_uncertainty_of_data(variances);
+    if (variances.one_sided && remarks)
         remarks->push_back("one side of an input's uncertainty is out of range, so the other "
                            "side's difference was taken");
-    for (double& v : variance) v = v == v ? std::sqrt(v) : v;
-    return variance;
+    for (double& v : variances.of_rows) v = v == v ? std::sqrt(v) : v;
+    return variances.of_rows;
 }
 
 } // namespace registration

@@ -45,7 +45,8 @@ public:
     Results results_without_amount(core::Notes const&, bool explain) const;
 
     /// Combined standard uncertainty of each row by JCGM 100:2008, 5.1.3 note 2: each input moved
-    /// by plus and minus its own, half the difference, root sum of squares, inputs independent.
+    /// by plus and minus its own, half the difference, root sum of squares, inputs independent;
+    /// published uncertainties of the tables come in as the relations tell them.
     /// Where one side is refused the other side's difference is taken; where both are, the row is
     /// an error. `remarks` hears of it.
     std::vector<double> uncertainties(Results const& nominal, std::vector<std::string>* remarks);
@@ -86,9 +87,22 @@ private:
     void mark_rows();
     void weigh_amount();
     void multiply(Results&) const;
+    double amount_factor(std::size_t row, MolarMasses const&) const;
+    MolarMasses bridging_masses() const;
+
+    /// The sums of squares as inputs are moved one after the other.
+    struct Variances {
+        Results const& nominal;
+        std::vector<double> of_rows;
+        std::size_t inputs = 0;
+        bool one_sided = false;
+    };
+    static void count_inputs(std::size_t count);
     template<class Move>
-    void add_variance(std::vector<double>& variance, Results const& nominal, Given&,
-                      bool& one_sided, Move);
+    void add_variance(Variances&, Given&, Move);
+    void move_numbers(Given&, bool whole, Variances&);
+    void move_places(Given&, Need const&, Variances&);
+    void add_uncertainty_of_data(Variances&) const;
 
     Entry const& entry_;
     Arguments& arguments_;

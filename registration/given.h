@@ -5,12 +5,37 @@
 #include "registration/numbers.h"
 
 #include <cstddef>
+#include <memory>
 #include <optional>
 #include <span>
 #include <string>
 #include <string_view>
+#include <vector>
+
+namespace core::materials {
+class OwnMaterial;
+}
 
 namespace registration {
+
+/// An uncertain number inside an argument that is no column of numbers: a row of a mixture or of a
+/// material, a quantity within a text.
+struct Place {
+    std::size_t cell = 0, column = 0, row = 0;
+    double u = 0; ///< standard uncertainty in the unit the number is in
+};
+
+/// One such number, moved by `times` its uncertainty.
+struct MovedPlace {
+    Place place;
+    double times;
+};
+
+/// A material that was read, and what its reader remarked.
+struct KeptMaterial {
+    std::shared_ptr<const core::materials::OwnMaterial> material;
+    std::vector<std::string> remarks;
+};
 
 /// One argument of one call. It is read only when an overload asks, in the language that overload
 /// speaks: the same text may be a quantity to one and a mixture to another. What was read is kept
@@ -38,6 +63,8 @@ public:
     core::Table table() const;
     /// All rows as texts.
     core::Formulas texts() const;
+    /// The own material that was read from this argument, if it was.
+    KeptMaterial& kept_material() const { return kept_material_; }
     /// Whether a row has no content; valid for every kind of argument.
     bool blank(std::size_t row) const;
     /// Leaves rows out of a whole column: rising indices.
@@ -49,7 +76,13 @@ public:
     void move_all(double times);
     /// Moves one row only, for functions of a whole column.
     void move_one(std::size_t row, double times);
-    void move_back() { moved_.clear(); }
+    /// Moves one number inside an argument of another kind.
+    void move_place(Place const& place, double times) { moved_place_ = {place, times}; }
+    std::optional<MovedPlace> const& moved_place() const { return moved_place_; }
+    void move_back() {
+        moved_.clear();
+        moved_place_.reset();
+    }
 
     /// SI values as a function gets them: moved where they are.
     const double* si() const { return moved_.empty() ? numbers().si.data() : moved_.data(); }
@@ -64,8 +97,10 @@ private:
     mutable std::optional<core::Failure> unreadable_;
     mutable std::vector<double> table_;
     mutable std::vector<std::string_view> texts_;
+    mutable KeptMaterial kept_material_;
     std::vector<std::size_t> dropped_;
     boost::container::small_vector<double, 1> moved_;
+    std::optional<MovedPlace> moved_place_;
 };
 
 } // namespace registration

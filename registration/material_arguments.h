@@ -23,12 +23,16 @@ struct AnyOwnMaterial {
     std::shared_ptr<const core::materials::OwnMaterial> material;
 };
 
+/// What a sheet says of a material.
+struct MaterialDescription {
+    core::materials::Description description;
+};
+
 template<class Result>
 struct material_rows {
     material_rows(Given const& given, int index, core::Notes const& notes) {
         try {
-            only.material = std::make_shared<const core::materials::OwnMaterial>(
-                read_own_material(given, notes));
+            only.material = read_own_material(given, notes);
         } catch (core::Failure& failure) {
             failure.argument = index;
             throw;
@@ -49,6 +53,23 @@ template<>
 struct argument<AnyOwnMaterial> : Unchecked {
     static constexpr Need need{.kind = Need::Kind::material, .whole = true};
     using Rows = material_rows<AnyOwnMaterial>;
+};
+
+template<>
+struct argument<MaterialDescription> : Unchecked {
+    static constexpr Need need{.kind = Need::Kind::material, .whole = true};
+    struct Rows {
+        Rows(Given const& given, int index) {
+            try {
+                only.description = read_description(given);
+            } catch (core::Failure& failure) {
+                failure.argument = index;
+                throw;
+            }
+        }
+        MaterialDescription operator[](std::size_t) const { return only; }
+        MaterialDescription only;
+    };
 };
 
 } // namespace registration

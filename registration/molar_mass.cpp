@@ -2,8 +2,8 @@
 #include "registration/molar_mass.h"
 
 #include "core/substances/formula.h"
-#include "core/substances/gas.h"
 #include "core/substances/substance.h"
+#include "registration/gas_argument.h"
 
 namespace registration {
 
@@ -18,7 +18,8 @@ bool tells_molar_mass(Given const& given) {
 }
 
 bool knows_molar_mass(Need::Kind kind) {
-    return kind == Need::Kind::named || kind == Need::Kind::substance || kind == Need::Kind::gas;
+    return kind == Need::Kind::named || kind == Need::Kind::substance || kind == Need::Kind::gas ||
+           kind == Need::Kind::constant_gas;
 }
 
 namespace {
@@ -39,10 +40,13 @@ double of_named(std::string_view text) {
 } // namespace
 
 double molar_mass_of(Need::Kind kind, Given const& given, std::size_t row) {
+    if (kind == Need::Kind::gas)
+        return read_gas_argument(given, row, core::silent).molar_mass().value();
+    if (kind == Need::Kind::constant_gas)
+        return read_constant_gas(given, row, core::silent).gas.molar_mass().value();
     const std::string_view text = given.cell(row).text;
     if (kind == Need::Kind::substance)
         return core::substances::find_substance(text).molar_mass().value();
-    if (kind == Need::Kind::gas) return core::substances::read_gas(text).molar_mass().value();
     if (tells_molar_mass(given)) return given.si()[given.numbers().listed ? row : 0];
     return of_named(text);
 }

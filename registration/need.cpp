@@ -3,6 +3,7 @@
 
 #include "core/quantities.h"
 #include "core/text/quantity.h"
+#include "registration/gas_argument.h"
 #include "registration/molar_mass.h"
 #include "registration/own_material.h"
 
@@ -40,9 +41,30 @@ bool begins_with_letter(Given const& given) {
     return false;
 }
 
-/// A mixture begins with a number as a quantity does, and then adds.
+/// A mixture begins with a number as a quantity does, and then adds; or it is a block.
 bool is_mixture(Given const& given) {
+    if (means_mixture(given)) return true;
     return is_filled_text(given) && given.cell(0).text.find(" + ") != std::string_view::npos;
+}
+
+bool states_heat_capacity(Given const& given) {
+    for (std::size_t row = 0; row < given.cell_count(); ++row)
+        if (const Cell& cell = given.cell(row); cell.kind != Cell::Kind::blank)
+            return cell.kind == Cell::Kind::text && means_constant_gas(cell.text);
+    return false;
+}
+
+/// One that cannot be read is taken at its word, so that its own reason is told.
+bool is_constant_gas(core::Dimension heat_capacity, Given const& given) {
+    if (!states_heat_capacity(given)) return false;
+    if (heat_capacity == core::Dimension{}) return true;
+    std::size_t row = 0;
+    while (given.cell(row).kind == Cell::Kind::blank) ++row;
+    try {
+        return read_constant_gas(given, row, core::silent).stated == heat_capacity;
+    } catch (Failure const&) {
+        return true;
+    }
 }
 
 /// One that cannot be read is taken at its word, so that its own reason is told.
@@ -50,7 +72,7 @@ bool is_material_on(core::Dimension heat_capacity, Given const& given) {
     if (!means_own_material(given)) return false;
     if (heat_capacity == core::Dimension{}) return true;
     try {
-        switch (read_own_material(given, core::silent).basis()) {
+        switch (read_own_material(given, core::silent)->basis()) {
         case core::materials::Basis::molar:
             return heat_capacity == core::dimension<core::MolarHeatCapacity>;
         case core::materials::Basis::specific:
@@ -121,6 +143,10 @@ Failure wrong_kind(Need const& need, Given const& given, Numbers const& numbers)
 
 } // namespace
 
+bool stands_for_all_rows(Need const& need, Given const& given) {
+    return given.cell_count() == 1 || (need.kind == Need::Kind::gas && means_mixture(given));
+}
+
 bool accepts(Need const& need, Given const& given) {
     if (given.missing()) return need.optional;
     switch (need.kind) {
@@ -137,7 +163,9 @@ bool accepts(Need const& need, Given const& given) {
     case Need::Kind::material:
         return is_material_on(need.dimension, given);
     case Need::Kind::gas:
-        return begins_with_letter(given) || is_mixture(given);
+        return (begins_with_letter(given) || is_mixture(given)) && !states_heat_capacity(given);
+    case Need::Kind::constant_gas:
+        return is_constant_gas(need.dimension, given);
     case Need::Kind::named:
         return tells_molar_mass(given) ? fits_numbers(need, given) : is_filled_text(given);
     case Need::Kind::cell:
@@ -163,9 +191,11 @@ core::Failure misfit(Need const& need, Given const& given) {
         : cell.kind == Cell::Kind::number
             ? "the number " + core::text::write_number(static_cast<long double>(cell.number), 6)
             : "a blank cell";
-    return Failure(Failure::Kind::unfit, text, described(need),
-                   need.kind == Need::Kind::table ? "select cells that hold plain numbers"
-                                                  : "write it as text");
+    const char* repair = need.kind == Need::Kind::table ? "select cells that hold plain numbers"
+                         : need.kind == Need::Kind::constant_gas
+                             ? "write the gas in front of its heat capacity"
+                             : "write it as text";
+    return Failure(Failure::Kind::unfit, text, described(need), repair);
 }
 
 std::string described(Need const& need) {
@@ -183,7 +213,10 @@ std::string described(Need const& need) {
     case Need::Kind::material:
         return "an own material: a block under headings, or the text of MATERIAL.OF";
     case Need::Kind::gas:
-        return "a gas such as `N2`, or a mixture such as `0.79 N2 + 0.21 O2`";
+        return "a gas such as `N2`, or a mixture such as `0.79 N2 + 0.21 O2` or a block of gases "
+               "and fractions";
+    case Need::Kind::constant_gas:
+        return "a gas with its heat capacity such as `air, cp = 1.005 kJ/(kg·K)`";
     case Need::Kind::equation:
         return "a reaction equation such as `2 Al + 3/2 O2 -> Al2O3`";
     case Need::Kind::left_out:

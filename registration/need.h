@@ -19,6 +19,7 @@ struct Need {
         named,        ///< a substance only for its molar mass, which may stand in its place
         substance,    ///< a substance of the tables
         gas,          ///< a gas of the tables or a mixture of such
+        constant_gas, ///< the same with a constant heat capacity of the dimension below, or of any
         equation,     ///< a reaction equation
         material,     ///< an own material of the basis below
         cell,         ///< a cell as it stands
@@ -40,6 +41,10 @@ struct Need {
                a.share == b.share;
     }
 };
+
+/// Whether an argument that is no column of numbers is one thing for all rows: one cell, or a
+/// mixture in a block.
+bool stands_for_all_rows(Need const&, Given const&);
 
 /// Whether the argument, as it stands, can be what the parameter needs.
 bool accepts(Need const&, Given const&);

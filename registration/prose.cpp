@@ -3,6 +3,7 @@
 
 #include "core/constants.h"
 #include "core/text/quantity.h"
+#include "registration/gas_argument.h"
 #include "registration/own_material.h"
 
 #include <cctype>
@@ -144,7 +145,10 @@ std::string steps(Evaluation const& evaluation, Results const& results, Results 
                           formula.find(input.argument->symbol) != std::string_view::npos);
         if (input.need->kind == Need::Kind::material)
             text += std::string(input.argument->name) + ": " +
-                    read_own_material(*input.given, core::silent).written() + "\n";
+                    read_own_material(*input.given, core::silent)->written() + "\n";
+        else if (input.need->kind == Need::Kind::gas && means_mixture(*input.given))
+            text += std::string(input.argument->name) + ": " +
+                    read_gas_argument(*input.given, 0, core::silent).written() + "\n";
         else if (input.need->whole)
             list_whole(text, input);
         else if (!is_numeric(input))

@@ -7,31 +7,31 @@
 #include "core/substances/gas.h"
 #include "core/substances/reaction.h"
 #include "core/substances/substance.h"
+#include "core/written.h"
 #include "registration/argument.h"
+#include "registration/gas_argument.h"
 
 #include <optional>
 
 namespace registration {
 
-/// A parameter that `read` makes of the text in a row.
+/// A parameter that `read` makes of a row.
 template<class T, auto read, Need::Kind kind_of_need>
-struct text_argument : Unchecked {
+struct read_argument : Unchecked {
     static constexpr Need need{.kind = kind_of_need};
 
     class Rows {
     public:
         Rows(Given const& given, int index, core::Notes const& notes)
             : given_(&given), index_(index) {
-            if (given.cell_count() == 1) only_ = made(given.cell(0), notes);
+            if (stands_for_all_rows(need, given)) only_ = made(0, notes);
         }
-        T operator[](std::size_t row) const {
-            return only_ ? *only_ : made(given_->cell(row), core::silent);
-        }
+        T operator[](std::size_t row) const { return only_ ? *only_ : made(row, core::silent); }
 
     private:
-        T made(Cell const& cell, core::Notes const& notes) const {
+        T made(std::size_t row, core::Notes const& notes) const {
             try {
-                return read(cell.text, notes);
+                return read(*given_, row, notes);
             } catch (core::Failure& failure) {
                 failure.argument = index_;
                 throw;
@@ -43,16 +43,51 @@ struct text_argument : Unchecked {
     };
 };
 
+inline core::substances::Substance substance_in(Given const& given, std::size_t row,
+                                                core::Notes const& notes) {
+    return core::substances::find_substance(given.cell(row).text, notes);
+}
+inline core::substances::Reaction reaction_in(Given const& given, std::size_t row,
+                                              core::Notes const& notes) {
+    return core::substances::read_reaction(given.cell(row).text, notes);
+}
+
 template<>
 struct argument<core::substances::Substance>
-    : text_argument<core::substances::Substance, core::substances::find_substance,
-                    Need::Kind::substance> {};
+    : read_argument<core::substances::Substance, substance_in, Need::Kind::substance> {};
 template<>
 struct argument<core::substances::Gas>
-    : text_argument<core::substances::Gas, core::substances::read_gas, Need::Kind::gas> {};
+    : read_argument<core::substances::Gas, read_gas_argument, Need::Kind::gas> {};
 template<>
 struct argument<core::substances::Reaction>
-    : text_argument<core::substances::Reaction, core::substances::read_reaction,
-                    Need::Kind::equation> {};
+    : read_argument<core::substances::Reaction, reaction_in, Need::Kind::equation> {};
+template<>
+struct argument<ConstantGas>
+    : read_argument<ConstantGas, read_constant_gas, Need::Kind::constant_gas> {};
+
+/// A gas whose constant heat capacity is stated on this basis, which the result then has.
+template<class Basis>
+struct ConstantGasOn : ConstantGas {};
+template<class Basis>
+struct argument<ConstantGasOn<Basis>> : Unchecked {
+    static constexpr Need need{.kind = Need::Kind::constant_gas,
+                               .dimension = core::dimension<core::On<core::HeatCapacity, Basis>>};
+    struct Rows : argument<ConstantGas>::Rows {
+        using argument<ConstantGas>::Rows::Rows;
+        ConstantGasOn<Basis> operator[](std::size_t row) const {
+            return {argument<ConstantGas>::Rows::operator[](row)};
+        }
+    };
+};
+
+/// The heat capacity for the relations, told where somebody reads along.
+inline core::Positive<core::MolarHeatCapacity> molar_heat_capacity(ConstantGas const& gas,
+                                                                   core::Notes const& notes) {
+    notes.step([&] {
+        return "M = " + core::written(gas.gas.molar_mass()) +
+               ", cp = " + core::written(gas.heat_capacity);
+    });
+    return {gas.heat_capacity};
+}
 
 } // namespace registration

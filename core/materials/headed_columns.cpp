@@ -4,6 +4,7 @@
 #include "core/text/characters.h"
 #include "core/text/number.h"
 #include "core/text/unit.h"
+#include "core/written.h"
 
 #include <algorithm>
 #include <cmath>
@@ -134,6 +135,18 @@ Known recognised(HeadedColumn const& column, Notes const& notes) {
     refuse_heading(column);
 }
 
+void check_uncertainties(std::span<const HeadedColumn> columns, std::size_t at) {
+    HeadedColumn const& u = columns[at];
+    if (at == 0 || holds_uncertainties(columns[at - 1]) ||
+        columns[at - 1].numbers.size() != u.numbers.size())
+        refuse_unfit("a column headed `u`", "numbers of the same rows in the column before it",
+                     "set `u` to the right of the numbers it belongs to");
+    for (const double number : u.numbers)
+        if (number < 0)
+            refuse_unfit("u = " + written(number), "standard uncertainties of 0 or more",
+                         "give u as a positive number in the unit of its value");
+}
+
 /// All columns, each known.
 class Columns {
 public:
@@ -141,7 +154,11 @@ public:
         if (columns.size() > most_columns)
             refuse_unfit(std::to_string(columns.size()) + " columns",
                          "a material of no more than 40 columns", "select the block anew");
-        for (HeadedColumn const& column : columns) add(recognised(column, notes));
+        for (std::size_t at = 0; at < columns.size(); ++at)
+            if (holds_uncertainties(columns[at]))
+                check_uncertainties(columns, at);
+            else
+                add(recognised(columns[at], notes));
         for (Known const& known : known_)
             if (known.role != Role::molar_mass) check_length(known);
         find_rows();
@@ -352,6 +369,10 @@ void set_molar_mass(OwnMaterial& material, Columns const& columns) {
 }
 
 } // namespace
+
+bool holds_uncertainties(HeadedColumn const& column) {
+    return without_blanks(column.heading) == "u";
+}
 
 OwnMaterial read_columns(std::span<const HeadedColumn> given, Notes const& notes) {
     const Columns columns(given, notes);

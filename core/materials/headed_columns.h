@@ -12,7 +12,8 @@
 // real number; a power without a unit has that of the first power in the unit of a heat capacity;
 // `T^1 / (J/(mol·K²))` is read too. The heat capacities say whether everything is molar, specific
 // or of the whole. A `transition` happens at the row's upper end, a `spread` is taken up evenly on
-// the row's way; blank cells there are none.
+// the row's way; blank cells there are none. A column headed `u` holds the standard uncertainties of
+// the column before it, in its unit; it changes nothing here (whoever moves a number by its own).
 
 #include "core/materials/own_material.h"
 #include "core/notes.h"
@@ -29,9 +30,13 @@ struct HeadedColumn {
     std::vector<std::string_view> words = {}; ///< in their place under `phase`
 };
 
+/// Whether a column holds the uncertainties of the one before it.
+bool holds_uncertainties(HeadedColumn const&);
+
 /// Makes the material. Rows blank in every column are left out.
 /// Refuses headings that are unknown, stand twice or are missing, units of the wrong dimension or
-/// of different bases, columns of different lengths (#VALUE!), and what the curves refuse.
+/// of different bases, columns of different lengths, uncertainties below zero or without numbers
+/// before them (#VALUE!), and what the curves refuse.
 /// Bounds: 40 columns.
 OwnMaterial read_columns(std::span<const HeadedColumn> columns, Notes const& notes = silent);
 

@@ -1,7 +1,6 @@
 // SPDX-License-Identifier: MPL-2.0
 #include "core/materials/material_text.h"
 
-#include "core/materials/headed_columns.h"
 #include "core/text/characters.h"
 
 #include <algorithm>
@@ -102,7 +101,7 @@ bool is_material_text(std::string_view text) {
     return text.empty() || text.front() == ' ' || text.front() == '|' || text.front() == '"';
 }
 
-OwnMaterial read_material(std::string_view text, Notes const& notes) {
+Description read_description(std::string_view text) {
     if (!is_material_text(text))
         refuse_unfit(text::shown(text), "a text that begins with `material`",
                      "take the text as MATERIAL.OF wrote it");
@@ -110,111 +109,59 @@ OwnMaterial read_material(std::string_view text, Notes const& notes) {
         refuse_unfit(text::shown(text), "the text of a material of no more than 32000 bytes",
                      "give the block of cells instead");
     Reader reader(text);
-    const std::string_view name = reader.read_name();
-    OwnMaterial material = materials::read_columns(reader.read_columns(), notes);
-    material.set_name(name);
+    Description description{reader.read_name()};
+    description.columns = reader.read_columns();
+    return description;
+}
+
+OwnMaterial made_of(Description const& description, Notes const& notes) {
+    OwnMaterial material = read_columns(description.columns, notes);
+    material.set_name(description.name);
     return material;
 }
 
 namespace {
 
-class Writer {
-public:
-    explicit Writer(OwnMaterial const& material) : material_(material), text_(leading_word) {}
+std::size_t length(HeadedColumn const& column) {
+    return std::max(column.numbers.size(), column.words.size());
+}
 
-    std::string write() {
-        if (!material_.name().empty()) text_ += " \"" + std::string(material_.name()) + '"';
-        if (const auto mass = material_.molar_mass())
-            column("molar mass / (kg/mol)", std::vector{mass->value()});
-        if (material_.rows().empty())
-            write_table();
-        else
-            write_rows();
-        return std::move(text_);
-    }
+bool is_blank(HeadedColumn const& column, std::size_t row) {
+    return column.words.empty() ? row >= column.numbers.size() || std::isnan(column.numbers[row])
+                                : column.words[row].empty();
+}
 
-private:
-    std::string_view heat_capacity_unit() const {
-        constexpr std::string_view units[] = {"(J/(mol·K))", "(J/(kg·K))", "(J/K)"};
-        return units[static_cast<std::size_t>(material_.basis())];
-    }
-    std::string_view energy_unit() const {
-        constexpr std::string_view units[] = {"(J/mol)", "(J/kg)", "J"};
-        return units[static_cast<std::size_t>(material_.basis())];
-    }
+/// Whether a row holds nothing; a molar mass is of no row.
+bool is_blank(Description const& description, std::size_t row) {
+    return std::ranges::all_of(description.columns,
+                               [&](HeadedColumn const& column) { return is_blank(column, row); });
+}
 
-    template<class Values>
-    void column(std::string const& heading, Values const& values) {
-        text_ += " | " + heading + ':';
-        for (const double value : values) text_ += ' ' + number(value);
-    }
+/// Without the characters that would end a text here.
+void check_writable(std::string_view text, const char* ends) {
+    if (text.find_first_of(ends) != std::string_view::npos)
+        refuse_unfit(text::shown(text),
+                     std::string("a text without any of `") + ends + "`, which part a material",
+                     "leave the character out");
+}
 
-    /// A column of what `of` takes from each row.
-    template<class Of>
-    void row_column(std::string const& heading, Of&& of) {
-        std::vector<double> values;
-        for (CorrelationRow const& row : material_.rows()) values.push_back(of(row));
-        column(heading, values);
-    }
-
-    template<class Of>
-    void latent_column(std::string const& label, Of&& of) {
-        const auto rows = material_.rows();
-        if (std::all_of(rows.begin(), rows.end(), [&](auto const& row) { return of(row) == 0; }))
-            return;
-        row_column(label + " / " + std::string(energy_unit()), of);
-    }
-
-    void write_table() {
-        column("T / K", material_.temperatures());
-        column("cp / " + std::string(heat_capacity_unit()), material_.heat_capacities());
-    }
-
-    void write_rows() {
-        row_column("from / K", [](auto const& row) { return row.from; });
-        row_column("to / K", [](auto const& row) { return row.to; });
-        for (const double exponent : exponents())
-            row_column("T^" + number(exponent) + " / " + std::string(heat_capacity_unit()),
-                       [&](auto const& row) { return coefficient(row, exponent); });
-        latent_column("transition", [](auto const& row) { return row.transition; });
-        latent_column("spread", [](auto const& row) { return row.spread; });
-        write_phases();
-    }
-
-    /// Every exponent once, in the order in which the rows have them.
-    std::vector<double> exponents() const {
-        std::vector<double> all;
-        for (CorrelationRow const& row : material_.rows())
-            for (Term const& term : row.terms)
-                if (std::find(all.begin(), all.end(), term.exponent) == all.end())
-                    all.push_back(term.exponent);
-        return all;
-    }
-
-    static double coefficient(CorrelationRow const& row, double exponent) {
-        double sum = 0;
-        for (Term const& term : row.terms)
-            if (term.exponent == exponent) sum += term.coefficient;
-        return sum;
-    }
-
-    void write_phases() {
-        const auto rows = material_.rows();
-        if (std::all_of(rows.begin(), rows.end(),
-                        [](auto const& row) { return row.phase.empty(); }))
-            return;
-        text_ += " | phase:";
-        for (CorrelationRow const& row : rows) text_ += " \"" + row.phase + '"';
-    }
-
-    OwnMaterial const& material_;
-    std::string text_;
-};
+std::string cell(HeadedColumn const& column, std::size_t row) {
+    if (column.words.empty()) return number(is_blank(column, row) ? 0 : column.numbers[row]);
+    check_writable(column.words[row], "\"");
+    return '"' + std::string(column.words[row]) + '"';
+}
 
 } // namespace
 
-std::string write_material(OwnMaterial const& material) {
-    std::string text = Writer(material).write();
+std::string write_material(Description const& description) {
+    std::string text(leading_word);
+    if (!description.name.empty()) text += " \"" + std::string(description.name) + '"';
+    for (HeadedColumn const& column : description.columns) {
+        check_writable(column.heading, ":|\"");
+        text.append(" | ").append(column.heading) += ':';
+        for (std::size_t row = 0; row < length(column); ++row)
+            if (!is_blank(description, row)) text += ' ' + cell(column, row);
+    }
     if (text.size() > longest_material_text)
         refuse_unfit("a text of " + std::to_string(text.size()) + " bytes",
                      "a material whose text has no more than 32000 bytes",

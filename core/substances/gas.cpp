@@ -119,18 +119,6 @@ bool is_condensed(std::string_view text) {
     }
 }
 
-Component component(Term const& term, std::string_view whole, Notes const& notes) {
-    const Substance gas = find_gas(term.substance, notes);
-    if (!gas.is_gas())
-        refuse(whole, "gases only, where `" + gas.written() + "` is none", "leave the state out");
-    if (notes.hears_remarks() && is_condensed(term.substance))
-        notes.remark([&] {
-            return gas.written() +
-                   " is taken as an ideal gas; at 298.15 K and 1 bar it is condensed";
-        });
-    return {gas, term.coefficient};
-}
-
 } // namespace
 
 Gas::Gas(std::vector<Component> components) : components_(std::move(components)) {
@@ -194,17 +182,34 @@ MolarEntropy Gas::entropy_between(Temperature from, Temperature to) const {
     return mean(components_, [&](Substance const& s) { return entropy_of_heating(s, from, to); });
 }
 
+Substance read_component(std::string_view name, Notes const& notes) {
+    const Substance gas = find_gas(name, notes);
+    if (!gas.is_gas())
+        refuse(name, "gases only, where `" + gas.written() + "` is none", "leave the state out");
+    if (notes.hears_remarks() && is_condensed(name))
+        notes.remark([&] {
+            return gas.written() +
+                   " is taken as an ideal gas; at 298.15 K and 1 bar it is condensed";
+        });
+    return gas;
+}
+
+void check_each_once(std::span<const Component> components) {
+    for (std::size_t i = 0; i < components.size(); ++i)
+        for (std::size_t j = 0; j < i; ++j)
+            if (components[i].substance == components[j].substance)
+                refuse(components[i].substance.written(), "each gas once",
+                       "put the fractions of it together");
+}
+
 Gas read_gas(std::string_view text, Notes const& notes) {
     if (text.size() > longest) refuse({}, "a gas of at most 1000 characters", "shorten it");
     const std::vector<Term> terms = read_terms(text, text);
     if (terms.size() > most_components) refuse(text, "at most 50 components", "shorten it");
     std::vector<Component> components;
-    for (Term const& term : terms) {
-        components.push_back(component(term, text, notes));
-        for (std::size_t i = 0; i + 1 < components.size(); ++i)
-            if (components[i].substance == components.back().substance)
-                refuse(text, "each gas once", "put the fractions of it together");
-    }
+    for (Term const& term : terms)
+        components.push_back({read_component(term.substance, notes), term.coefficient});
+    check_each_once(components);
     return Gas(std::move(components));
 }
 
@@ -223,6 +228,10 @@ MolarEntropy entropy_standard_of_gas(Gas const& gas, Temperature temperature,
                                      std::optional<Positive<Pressure>> pressure,
                                      Notes const& notes) {
     const MolarEntropy at_one_bar = gas.entropy(temperature);
+    for (Component const& each : gas.components())
+        notes.uncertainty([&] {
+            return each.fraction * each.substance.entropy_uncertainty(temperature).value();
+        });
     notes.step([&] { return "at 1 bar: " + written(at_one_bar); });
     notes.step([&] { return "of it -R · Σ x · ln x = " + written(of_mixing(gas.components())); });
     if (!pressure) return at_one_bar;

@@ -50,6 +50,13 @@ private:
     std::vector<Component> components_;
 };
 
+/// Finds one gas of a mixture; the state `(g)` need not be written. What is condensed at room
+/// temperature is remarked. Refuses other states (#VALUE!).
+Substance read_component(std::string_view name, Notes const& notes = silent);
+
+/// Refuses a gas that stands twice (#VALUE!).
+void check_each_once(std::span<const Component> components);
+
 /// Reads one gas, `N2`, `air`, or a mixture by mole fractions, `0.79 N2 + 0.21 O2`. Here the state
 /// `(g)` need not be written: every component is its gas.
 /// Refuses other states, a gas that stands twice, fractions that do not sum to 1 (#VALUE!).

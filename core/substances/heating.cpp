@@ -189,6 +189,7 @@ MolarEntropy entropy_standard(Substance const& substance, Temperature temperatur
     const MolarEntropy at_one_bar = substance.entropy(temperature);
     notes.step([&] { return std::string(phase.name()) + " at 1 bar: " + written(at_one_bar); });
     remark_state(substance, temperature, notes);
+    notes.uncertainty([&] { return substance.entropy_uncertainty(temperature).value(); });
     if (!pressure) return at_one_bar;
     if (phase.aggregation() != Aggregation::gas)
         refuse_unfit(written(pressure->value),

@@ -32,14 +32,18 @@ void add_step(std::vector<CurvePoint>& curve, Substance const& substance, Temper
 
 } // namespace
 
-std::vector<CurvePoint> heating_curve(Substance const& substance, Temperature from, Temperature to,
-                                      std::size_t points) {
+void check_curve(Temperature from, Temperature to, std::size_t points) {
     if (!(to > from))
         refuse_impossible("from " + written(from) + " to " + written(to), "an end above the start",
                           "exchange the two temperatures");
     if (points < 2 || points > most_points)
         refuse_impossible(std::to_string(points) + " points", "from 2 to 10000 points",
                           "choose as many points as the chart needs");
+}
+
+std::vector<CurvePoint> heating_curve(Substance const& substance, Temperature from, Temperature to,
+                                      std::size_t points) {
+    check_curve(from, to, points);
     const std::span<const Rung> rungs = substance.rungs();
     std::size_t next = substance.rung_at(from) + 1;
     const double start = absolute(from).value(), span = (to - from).value();

@@ -17,6 +17,9 @@ struct CurvePoint {
     MolarEntropy entropy;
 };
 
+/// Refuses `to` not above `from`, fewer than 2 or more than 10,000 points (#NUM!).
+void check_curve(Temperature from, Temperature to, std::size_t points);
+
 /// Heating at 1 bar from one temperature to a higher one: `points` equally spaced temperatures, and
 /// at every first-order transition between them two more, below and above, so that a chart has an
 /// upright step there.

@@ -135,4 +135,15 @@ MolarEntropy Substance::entropy(Temperature t) const {
 
 MolarEnergy Substance::gibbs(Temperature t) const { return enthalpy(t) - absolute(t) * entropy(t); }
 
+MolarEntropy Substance::entropy_uncertainty(Temperature t) const {
+    const Phase phase = phase_at(t);
+    if (phase.aggregation() == Aggregation::gas) return phase.entropy_uncertainty();
+    const Substance in_any_state(views()[row().first_view]);
+    for (Substance const& each : {*this, in_any_state})
+        for (Rung const& rung : each.rungs())
+            if (rung.from <= 298.15 && rung.to >= 298.15)
+                return phase_of(rung).entropy_uncertainty();
+    return {};
+}
+
 } // namespace core::substances

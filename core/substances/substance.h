@@ -32,6 +32,7 @@ public:
     std::string_view source() const { return row_->source; }
     std::string_view note() const { return row_->note; }
     Aggregation aggregation() const { return row_->aggregation; }
+    MolarEntropy entropy_uncertainty() const { return MolarEntropy::from_value(row_->entropy_u); }
     MolarMass molar_mass() const;
     Temperature from() const;
     Temperature to() const;
@@ -87,6 +88,10 @@ public:
     MolarEnergy enthalpy(Temperature) const;
     MolarEntropy entropy(Temperature) const;
     MolarEnergy gibbs(Temperature) const;
+    /// Published standard uncertainty of the absolute entropy at 298.15 K that the one at the
+    /// temperature is counted from: of the gas for a gas, of the crystal or liquid stable at
+    /// 298.15 K for condensed phases; 0 where none is known.
+    MolarEntropy entropy_uncertainty(Temperature) const;
 
     friend bool operator==(Substance a, Substance b) { return a.view_ == b.view_; }
 

@@ -23,6 +23,7 @@ struct PhaseRow {
     std::uint16_t substance;
     std::uint16_t first_interval, interval_count;
     double enthalpy_of_formation; ///< J/mol at 298.15 K, as printed
+    double entropy_u;             ///< standard uncertainty of S°(298.15 K), J/(mol·K); 0: unknown
     std::string_view source;      ///< report and page
     std::string_view note;        ///< an oddity of the source, or empty
 };

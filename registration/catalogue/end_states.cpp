@@ -22,6 +22,19 @@ Temperature real_end(Positive<MolarHeatCapacity> heat_capacity, Temperature star
     return temperature_adiabatic(heat_capacity, start, from, to, efficiency, notes);
 }
 
+// A gas named with its heat capacity.
+Temperature end_of_constant_gas(ConstantGas const& gas, Temperature start, Positive<Pressure> from,
+                                Positive<Pressure> to, std::optional<Efficiency> efficiency,
+                                Notes const& notes) {
+    return temperature_adiabatic(molar_heat_capacity(gas, notes), start, from, to, efficiency,
+                                 notes);
+}
+core::Dimensionless efficiency_of_constant_gas(ConstantGas const& gas, Temperature t1,
+                                               Positive<Pressure> p1, Temperature t2,
+                                               Positive<Pressure> p2, Notes const& notes) {
+    return efficiency_isentropic(molar_heat_capacity(gas, notes), t1, p1, t2, p2, notes);
+}
+
 constexpr const char* isentropic = "T2s = T1 · (p2 / p1)^(R / cp), the step of an ideal gas at "
                                    "constant entropy; definition of isentropic efficiency";
 constexpr const char* valid =
@@ -44,6 +57,10 @@ constexpr Entry entries[] = {
                    form<real_end>(
                        "T2 = T1 + (T2s - T1) / η of a compressor, T1 - η · (T1 - T2s) of a turbine",
                        isentropic, valid),
+                   form<end_of_constant_gas>(
+                       "T2 = T1 + (T2s - T1) / η of a compressor, T1 - η · (T1 - T2s) of a "
+                       "turbine, T2s = T1 · (p2 / p1)^(R / cp)",
+                       isentropic, stated_cp),
                    form<core::substances::temperature_adiabatic>(
                        "T2 = T(h2), h2 - h1 = (h2s - h1) / η of a compressor, (h2s - h1) · η of a "
                        "turbine, ∫cp/T dT from T1 to T2s = R · ln(p2 / p1)",
@@ -63,6 +80,9 @@ constexpr Entry entries[] = {
              {form<efficiency_isentropic>(
                   "η = (T2s - T1) / (T2 - T1) of a compressor, (T1 - T2) / (T1 - T2s) of a turbine",
                   isentropic, valid),
+              form<efficiency_of_constant_gas>(
+                  "η = (T2s - T1) / (T2 - T1) of a compressor, (T1 - T2) / (T1 - T2s) of a turbine",
+                  isentropic, stated_cp),
               form<core::substances::efficiency_isentropic>(
                   "η = (h2s - h1) / (h2 - h1) of a compressor, (h1 - h2) / (h1 - h2s) of a turbine",
                   report, table_gas)},

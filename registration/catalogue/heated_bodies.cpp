@@ -10,7 +10,26 @@
 #include <memory>
 #include <vector>
 
-namespace registration::catalogue {
+namespace registration {
+
+/// What bodies are made of, one text each, with a number inside one of them moved or not.
+struct BodyMaterials {
+    core::Formulas texts;
+    std::optional<MovedPlace> moved;
+};
+template<>
+struct argument<BodyMaterials> : Unchecked {
+    static constexpr Need need{.kind = Need::Kind::text, .whole = true};
+    struct Rows {
+        Rows(Given const& given, int) : given_(&given) {}
+        BodyMaterials operator[](std::size_t) const {
+            return {given_->texts(), given_->moved_place()};
+        }
+        Given const* given_;
+    };
+};
+
+namespace catalogue {
 namespace {
 
 using namespace core::substances;
@@ -59,25 +78,41 @@ Temperature own_heated_amount(OwnMaterialOn<Basis> const& own, Temperature from,
                                                       notes);
 }
 
-/// Bodies whose materials stand as text: a substance, or a constant heat capacity of the basis the
-/// amounts are given on.
+template<class Basis>
+core::Dimensionless own_share(OwnMaterialOn<Basis> const& own, Temperature from,
+                              core::On<Energy, Basis> heat, LeftOut, std::string_view phase,
+                              Notes const& notes) {
+    return core::materials::fraction_of_phase<Basis>(*own.material, from, heat, phase, notes);
+}
+template<class Basis>
+core::Dimensionless own_share_of_amount(OwnMaterialOn<Basis> const& own, Temperature from,
+                                        Energy heat, Positive<typename Basis::Amount> amount,
+                                        std::string_view phase, Notes const& notes) {
+    return core::materials::fraction_of_phase<Basis>(*own.material, from, heat / amount.value,
+                                                     phase, notes);
+}
+
+/// Bodies whose materials stand as text: a substance, an own material, or a constant heat capacity,
+/// the latter two on the basis the amounts are given on.
 class Bodies {
 public:
     template<class Amount>
-    Bodies(Formulas materials, Column<Amount> amounts, Column<Temperature> temperatures) {
+    Bodies(BodyMaterials const& given, Column<Amount> amounts, Column<Temperature> temperatures)
+        : moved_(given.moved) {
+        Formulas const& materials = given.texts;
         if (materials.size() != amounts.size() || amounts.size() != temperatures.size())
             core::refuse_unfit(
                 std::to_string(materials.size()) + " materials, " + std::to_string(amounts.size()) +
                     " amounts and " + std::to_string(temperatures.size()) + " temperatures",
                 "one of each for every body", "select the same rows for all three columns");
         for (std::size_t row = 0; row < materials.size(); ++row)
-            add(materials[row], amounts[row], temperatures[row]);
+            add(row, materials[row], amounts[row], temperatures[row]);
     }
     std::span<const Body> bodies() const { return bodies_; }
 
 private:
     template<class Amount>
-    void add(std::string_view text, Amount amount, Temperature temperature) {
+    void add(std::size_t row, std::string_view text, Amount amount, Temperature temperature) {
         if (!(amount.value() > 0))
             core::refuse_impossible(
                 "an amount of " +
@@ -85,21 +120,9 @@ private:
                 "amounts above 0", "leave out the bodies that are not there");
         double count = amount.value();
         if (text[0] >= '0' && text[0] <= '9') {
-            const auto heat_capacity = core::text::read_quantity(text);
-            const core::Dimension needed =
-                core::dimension<core::HeatCapacity> / core::dimension<Amount>;
-            if (heat_capacity.unit.dimension != needed || !(heat_capacity.si > 0))
-                core::refuse_unfit(std::string(text),
-                                   core::text::name_of(needed) +
-                                       " above 0, on the basis of the amounts",
-                                   "give heat capacity and amount both per mole or both per mass");
-            materials_.push_back(std::make_unique<ConstantMaterial>(heat_capacity.si));
+            materials_.push_back(constant<Amount>(row, text));
         } else if (core::materials::is_material_text(text)) {
-            core::materials::OwnMaterial own = core::materials::read_material(text);
-            core::materials::require(own, std::is_same_v<Amount, Mass>
-                                              ? core::materials::Basis::specific
-                                              : core::materials::Basis::molar);
-            materials_.push_back(std::make_unique<core::materials::OwnMaterial>(std::move(own)));
+            materials_.push_back(own<Amount>(row, text));
         } else {
             const Substance substance = find_substance(text);
             if constexpr (std::is_same_v<Amount, Mass>)
@@ -109,17 +132,45 @@ private:
         bodies_.push_back({materials_.back().get(), count, temperature});
     }
 
+    template<class Amount>
+    std::unique_ptr<Material> constant(std::size_t row, std::string_view text) const {
+        auto heat_capacity = core::text::read_quantity(text);
+        if (moved_ && moved_->place.cell == row)
+            heat_capacity.si += moved_->times * moved_->place.u;
+        const core::Dimension needed =
+            core::dimension<core::HeatCapacity> / core::dimension<Amount>;
+        if (heat_capacity.unit.dimension != needed || !(heat_capacity.si > 0))
+            core::refuse_unfit(std::string(text),
+                               core::text::name_of(needed) +
+                                   " above 0, on the basis of the amounts",
+                               "give heat capacity and amount both per mole or both per mass");
+        return std::make_unique<ConstantMaterial>(heat_capacity.si);
+    }
+
+    template<class Amount>
+    std::unique_ptr<Material> own(std::size_t row, std::string_view text) const {
+        auto description = core::materials::read_description(text);
+        move(description, moved_, row);
+        auto material =
+            std::make_unique<core::materials::OwnMaterial>(core::materials::made_of(description));
+        core::materials::require(*material, std::is_same_v<Amount, Mass>
+                                                ? core::materials::Basis::specific
+                                                : core::materials::Basis::molar);
+        return material;
+    }
+
+    std::optional<MovedPlace> moved_;
     std::vector<std::unique_ptr<Material>> materials_;
     std::vector<Body> bodies_;
 };
 
 template<class Amount>
-Temperature equalized(Formulas materials, Column<Amount> amounts, Column<Temperature> temperatures,
-                      Notes const& notes) {
+Temperature equalized(BodyMaterials const& materials, Column<Amount> amounts,
+                      Column<Temperature> temperatures, Notes const& notes) {
     return temperature_equalized(Bodies(materials, amounts, temperatures).bodies(), notes);
 }
 template<class Amount>
-core::Entropy equalizing(Formulas materials, Column<Amount> amounts,
+core::Entropy equalizing(BodyMaterials const& materials, Column<Amount> amounts,
                          Column<Temperature> temperatures, Notes const& notes) {
     return entropy_of_equalizing(Bodies(materials, amounts, temperatures).bodies(), notes);
 }
@@ -136,10 +187,12 @@ constexpr Argument amount_heated{
     .symbol = "n",
     .says = "how much is heated; left out where the heat is molar or specific",
     .example = "500 kg"};
-constexpr Argument materials{.name = "materials",
-                             .symbol = "material",
-                             .says = "a column of substances, or of heat capacities as text",
-                             .example = "B5:B7"};
+constexpr Argument materials{
+    .name = "materials",
+    .symbol = "material",
+    .says = "a column of substances, of texts of MATERIAL.OF, or of heat capacities "
+            "as text",
+    .example = "B5:B7"};
 constexpr Argument amounts_of_bodies{.name = "amounts",
                                      .symbol = "n",
                                      .says = "a column of masses or of amounts of substance",
@@ -182,12 +235,19 @@ constexpr Entry entries[] = {
                          .says = "l, g, cr for all crystals, or one crystal such as cr, α",
                          .example = "l"},
                         show}},
-         .forms = {form<
-             share_of_phase<MolarEnergy, LeftOut>, share_of_phase<SpecificEnergy, LeftOut>,
-             share_of_phase<Energy, Positive<AmountOfSubstance>>,
-             share_of_phase<Energy, Positive<Mass>>, share_of_phase<Power, Positive<MolarFlow>>,
-             share_of_phase<Power, Positive<MassFlow>>>(
-             "share of the transition at which Q / n ends, 0 or 1 elsewhere", report, at_one_bar)},
+         .forms =
+             {form<share_of_phase<MolarEnergy, LeftOut>, share_of_phase<SpecificEnergy, LeftOut>,
+                   share_of_phase<Energy, Positive<AmountOfSubstance>>,
+                   share_of_phase<Energy, Positive<Mass>>,
+                   share_of_phase<Power, Positive<MolarFlow>>,
+                   share_of_phase<Power, Positive<MassFlow>>>(
+                  "share of the transition at which Q / n ends, 0 or 1 elsewhere", report,
+                  at_one_bar),
+              form<own_share<core::Molar>, own_share<core::Specific>, own_share<core::Total>,
+                   own_share_of_amount<core::Molar>, own_share_of_amount<core::Specific>>(
+                  "share of the transition at which Q / n ends, by the phases the rows name",
+                  "the material as described in the sheet",
+                  "the range of the material; nothing is extrapolated")},
          .examples = {{{"FRACTION.PHASE(\"Al\"; \"25 °C\"; \"5 kJ/mol\"; ; \"l\")", 0}}}}),
     describe({.name = "TEMPERATURE.EQUALIZED",
               .says = "Common temperature of bodies that exchange heat with each other alone: "
@@ -214,4 +274,5 @@ constexpr Entry entries[] = {
 
 std::span<const Entry> heated_bodies() { return entries; }
 
-} // namespace registration::catalogue
+} // namespace catalogue
+} // namespace registration

@@ -25,8 +25,11 @@ inline constexpr Argument surroundings{.name = "surroundings",
 inline constexpr Argument constant_cp{
     .name = "gas",
     .symbol = "cp",
-    .says = "a gas or mixture of the tables, or a molar heat capacity at constant pressure",
+    .says = "a gas, a mixture as text or block, a molar heat capacity, or both: `air, cp = 1.005 "
+            "kJ/(kg·K)`",
     .example = "29.1 J/(mol·K)"};
+inline constexpr const char* stated_cp =
+    "ideal gas, cp constant or its mean between the temperatures; molar mass of the tables";
 inline constexpr Argument substance{
     .name = "substance",
     .symbol = "substance",

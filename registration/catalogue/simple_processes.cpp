@@ -10,7 +10,8 @@ namespace registration::catalogue {
 namespace {
 
 using namespace core::processes;
-using core::Molar, core::Pressure, core::Rate, core::Specific, core::Total, core::Volume;
+using core::Temperature, core::Molar, core::Pressure, core::Rate, core::Specific, core::Total,
+    core::Volume;
 
 // The gas of an isothermal change matters only for the basis of the result.
 template<class Basis>
@@ -23,6 +24,44 @@ core::MolarEntropy isothermal_between_pressures(core::Positive<Pressure> from,
                                                 core::Positive<Pressure> to,
                                                 std::optional<NamedSubstance>) {
     return isothermal_by_pressure(from, to);
+}
+
+// A gas named with its heat capacity: the relation for a molar one, on the basis it is stated on.
+template<class Basis, class MolarQuantity>
+core::On<core::Times<MolarQuantity, core::AmountOfSubstance>, Basis>
+on_basis(ConstantGasOn<Basis> const& gas, MolarQuantity molar) {
+    if constexpr (std::is_same_v<Basis, Molar>)
+        return molar;
+    else
+        return molar / gas.gas.molar_mass();
+}
+template<class Basis>
+core::On<core::Entropy, Basis> entropy_of_constant_gas(ConstantGasOn<Basis> const& gas,
+                                                       Temperature t1, core::Positive<Pressure> p1,
+                                                       Temperature t2, core::Positive<Pressure> p2,
+                                                       core::Notes const& notes) {
+    return on_basis(gas, entropy_of_gas(molar_heat_capacity(gas, notes), t1, p1, t2, p2));
+}
+template<class Basis>
+core::On<core::Energy, Basis> enthalpy_of_constant_gas(ConstantGasOn<Basis> const& gas,
+                                                       Temperature t1, core::Positive<Pressure> p1,
+                                                       Temperature t2, core::Positive<Pressure> p2,
+                                                       core::Notes const& notes) {
+    return on_basis(gas, enthalpy_of_gas(molar_heat_capacity(gas, notes), t1, p1, t2, p2));
+}
+template<class Basis>
+core::On<core::Entropy, Basis>
+adiabatic_of_constant_gas(ConstantGasOn<Basis> const& gas, Temperature t1,
+                          core::Positive<Pressure> p1, Temperature t2, core::Positive<Pressure> p2,
+                          core::Notes const& notes) {
+    return on_basis(gas,
+                    adiabatic_generation(molar_heat_capacity(gas, notes), t1, p1, t2, p2, notes));
+}
+template<class Basis>
+core::On<core::Entropy, Basis>
+polytropic_of_constant_gas(ConstantGasOn<Basis> const& gas, double exponent, Temperature from,
+                           Temperature to, core::Notes const& notes) {
+    return on_basis(gas, polytropic(molar_heat_capacity(gas, notes), exponent, from, to));
 }
 
 constexpr const char* ideal_gas = "dS = cp · dT / T - R · dp / p of an ideal gas, R of CODATA 2018";
@@ -105,6 +144,9 @@ constexpr Entry entries[] = {
                         show}},
          .forms = {form<polytropic>("ΔS = (cp - R · k / (k - 1)) · ln(T2 / T1)", ideal_gas,
                                     ideal_gas_valid),
+                   form<polytropic_of_constant_gas<Molar>, polytropic_of_constant_gas<Specific>>(
+                       "ΔS = (cp - R · k / (k - 1)) · ln(T2 / T1), cp as stated", ideal_gas,
+                       stated_cp),
                    form<core::substances::polytropic>(
                        "ΔS = ∫cp/T dT - R · k / (k - 1) · ln(T2 / T1), cp of the tables", report,
                        table_gas)},
@@ -117,6 +159,9 @@ constexpr Entry entries[] = {
                         show}},
          .forms = {form<entropy_of_gas>("ΔS = cp · ln(T2 / T1) - R · ln(p2 / p1)", ideal_gas,
                                         ideal_gas_valid),
+                   form<entropy_of_constant_gas<Molar>, entropy_of_constant_gas<Specific>>(
+                       "ΔS = cp · ln(T2 / T1) - R · ln(p2 / p1), cp as stated", ideal_gas,
+                       stated_cp),
                    form<core::substances::entropy_of_gas>(
                        "ΔS = ∫cp/T dT - R · ln(p2 / p1), cp of the tables", report, table_gas)},
          .examples = {{{"ENTROPY.GAS(\"29.10061916353634 J/(mol·K)\"; \"300 K\"; \"1 bar\"; "
@@ -129,6 +174,9 @@ constexpr Entry entries[] = {
                              amount, show}},
               .forms = {form<enthalpy_of_gas>("ΔH = cp · (T2 - T1)", "dh = cp · dT of an ideal gas",
                                               ideal_gas_valid),
+                        form<enthalpy_of_constant_gas<Molar>, enthalpy_of_constant_gas<Specific>>(
+                            "ΔH = cp · (T2 - T1), cp as stated", "dh = cp · dT of an ideal gas",
+                            stated_cp),
                         form<core::substances::enthalpy_of_gas>("ΔH = ∫cp dT, cp of the tables",
                                                                 report, table_gas)},
               .examples =
@@ -143,6 +191,9 @@ constexpr Entry entries[] = {
          .forms = {form<adiabatic_generation>(
                        "Sgen = cp · ln(T2 / T1) - R · ln(p2 / p1)", ideal_gas,
                        "no heat crosses the boundary; ideal gas, cp constant or its mean"),
+                   form<adiabatic_of_constant_gas<Molar>, adiabatic_of_constant_gas<Specific>>(
+                       "Sgen = cp · ln(T2 / T1) - R · ln(p2 / p1), cp as stated", ideal_gas,
+                       stated_cp),
                    form<core::substances::adiabatic_generation>(
                        "Sgen = ∫cp/T dT - R · ln(p2 / p1), cp of the tables", report, table_gas)},
          .examples =

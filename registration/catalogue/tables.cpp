@@ -1,12 +1,15 @@
 // SPDX-License-Identifier: MPL-2.0
+#include "core/materials/heating_curve.h"
 #include "core/substances/heating_curve.h"
 #include "core/substances/transition.h"
 #include "core/text/quantity.h"
 #include "registration/catalogue/catalogue.h"
 #include "registration/catalogue/shared_arguments.h"
+#include "registration/material_arguments.h"
 #include "registration/substance_arguments.h"
 
 #include <algorithm>
+#include <array>
 #include <cctype>
 #include <cmath>
 
@@ -125,47 +128,110 @@ Array substance_phases(Substance const& substance) {
 
 constexpr std::size_t curve_columns = 4;
 
-/// A column of a curve in the unit asked for; per mass by the molar mass.
-double in_column(std::size_t column, double si, Unit const& unit, double molar_mass) {
-    constexpr core::Dimension molar[curve_columns] = {
-        core::Dimension::of_temperature, core::dimension<core::MolarHeatCapacity>,
-        core::dimension<core::MolarEnergy>, core::dimension<core::MolarEntropy>};
-    if (unit.dimension == molar[column]) return unit.from_si(si);
-    if (column > 0 && unit.dimension * core::dimension<core::MolarMass> == molar[column])
-        return unit.from_si(si / molar_mass);
-    constexpr const char* needed[curve_columns] = {
-        "a temperature", "a heat capacity per mole or mass", "an enthalpy per mole or mass",
-        "an entropy per mole or mass"};
-    core::refuse_unfit("the heading of column " + std::to_string(column + 1), needed[column],
-                       "give four headings: T, cp, enthalpy, entropy");
-}
+/// The columns of a heating curve: headings, units, and what turns an amount into a mass.
+class Columns {
+public:
+    /// `molar_mass` is 0 where none is known; `heat_capacity` says what the curve is counted per.
+    Columns(std::optional<CurveHeadings> headings, core::Dimension heat_capacity, double molar_mass)
+        : molar_mass_(molar_mass), dimensions_{core::Dimension::of_temperature, heat_capacity,
+                                               heat_capacity * core::Dimension::of_temperature,
+                                               heat_capacity} {
+        headings_ = headings ? std::move(*headings) : in_si();
+        if (headings_.texts.size() != curve_columns)
+            core::refuse_unfit(std::to_string(headings_.texts.size()) + " headings",
+                               "four headings: T, cp, enthalpy, entropy",
+                               "select four heading cells");
+        for (std::string const& text : headings_.texts) curve_.add(text);
+    }
 
-Array curve_heating(Substance const& substance, Temperature from, Temperature to, double points,
-                    std::optional<CurveHeadings> headings) {
+    void add(std::initializer_list<double> values) {
+        std::size_t column = 0;
+        for (const double value : values) {
+            curve_.add(in_column(column, value));
+            ++column;
+        }
+    }
+    Array made() { return std::move(curve_); }
+
+private:
+    CurveHeadings in_si() const {
+        const std::string capacity = core::text::si_unit(dimensions_[1]);
+        const std::string energy = core::text::si_unit(dimensions_[2]);
+        const auto bracketed = [](std::string const& unit) {
+            return unit.find_first_of("/·") == std::string::npos ? unit : "(" + unit + ")";
+        };
+        CurveHeadings headings{{"T / K", "cp / " + bracketed(capacity), "ΔH / " + bracketed(energy),
+                                "ΔS / " + bracketed(capacity)},
+                               {}};
+        for (std::string const& text : headings.texts)
+            headings.units.push_back(core::text::read_heading(text).unit);
+        return headings;
+    }
+
+    /// A value in the unit asked for, on the other basis by the molar mass.
+    double in_column(std::size_t column, double si) const {
+        constexpr core::Dimension molar_mass = core::dimension<core::MolarMass>;
+        const Unit& unit = headings_.units[column];
+        if (unit.dimension == dimensions_[column]) return unit.from_si(si);
+        if (column > 0 && molar_mass_ > 0 && unit.dimension * molar_mass == dimensions_[column])
+            return unit.from_si(si / molar_mass_);
+        if (column > 0 && molar_mass_ > 0 && unit.dimension == dimensions_[column] * molar_mass)
+            return unit.from_si(si * molar_mass_);
+        constexpr const char* needed[curve_columns] = {"a temperature", "a heat capacity",
+                                                       "an enthalpy", "an entropy"};
+        core::refuse_unfit("the heading of column " + std::to_string(column + 1) + ", `" +
+                               headings_.texts[column] + "`",
+                           std::string(needed[column]) + ", for example in " +
+                               core::text::si_unit(dimensions_[column]),
+                           "give four headings: T, cp, enthalpy, entropy");
+    }
+
+    double molar_mass_;
+    std::array<core::Dimension, curve_columns> dimensions_;
+    CurveHeadings headings_;
+    Array curve_{curve_columns};
+};
+
+std::size_t whole_number_of(double points) {
     if (!(points >= 2 && points <= 10'000 && points == std::floor(points)))
         core::refuse_impossible(
             core::text::write_number(static_cast<long double>(points), 6) + " points",
             "a whole number of points from 2 to 10000", "choose as many points as the chart needs");
-    if (!headings)
-        headings =
-            CurveHeadings{{"T / K", "cp / (J/(mol·K))", "ΔH / (J/mol)", "ΔS / (J/(mol·K))"}, {}};
-    for (std::size_t at = headings->units.size(); at < headings->texts.size(); ++at)
-        headings->units.push_back(core::text::read_heading(headings->texts[at]).unit);
-    if (headings->texts.size() != curve_columns)
-        core::refuse_unfit(std::to_string(headings->texts.size()) + " headings",
-                           "four headings: T, cp, enthalpy, entropy", "select four heading cells");
-    Array curve(curve_columns);
-    for (std::string const& text : headings->texts) curve.add(text);
-    const double molar_mass = substance.molar_mass().value();
-    for (CurvePoint const& point :
-         heating_curve(substance, from, to, static_cast<std::size_t>(points))) {
-        const double values[curve_columns] = {absolute(point.temperature).value(),
-                                              point.heat_capacity.value(), point.enthalpy.value(),
-                                              point.entropy.value()};
-        for (std::size_t column = 0; column < curve_columns; ++column)
-            curve.add(in_column(column, values[column], headings->units[column], molar_mass));
+    return static_cast<std::size_t>(points);
+}
+
+Array curve_heating(Substance const& substance, Temperature from, Temperature to, double points,
+                    std::optional<CurveHeadings> headings) {
+    const std::size_t count = whole_number_of(points);
+    Columns columns(std::move(headings), core::dimension<core::MolarHeatCapacity>,
+                    substance.molar_mass().value());
+    for (CurvePoint const& point : heating_curve(substance, from, to, count))
+        columns.add({absolute(point.temperature).value(), point.heat_capacity.value(),
+                     point.enthalpy.value(), point.entropy.value()});
+    return columns.made();
+}
+
+core::Dimension heat_capacity_on(core::materials::Basis basis) {
+    switch (basis) {
+    case core::materials::Basis::molar:
+        return core::dimension<core::MolarHeatCapacity>;
+    case core::materials::Basis::specific:
+        return core::dimension<core::SpecificHeatCapacity>;
+    case core::materials::Basis::total:
+        break;
     }
-    return curve;
+    return core::dimension<core::HeatCapacity>;
+}
+
+Array own_curve_heating(AnyOwnMaterial const& own, Temperature from, Temperature to, double points,
+                        std::optional<CurveHeadings> headings) {
+    const std::size_t count = whole_number_of(points);
+    const auto molar_mass = own.material->molar_mass();
+    Columns columns(std::move(headings), heat_capacity_on(own.material->basis()),
+                    molar_mass ? molar_mass->value() : 0);
+    for (auto const& point : core::materials::heating_curve(*own.material, from, to, count))
+        columns.add({point.temperature, point.heat_capacity, point.enthalpy, point.entropy});
+    return columns.made();
 }
 
 constexpr Entry entries[] = {
@@ -184,22 +250,26 @@ constexpr Entry entries[] = {
                  "them, and sources.",
          .arguments = {{substance}},
          .forms = {form<substance_phases>("the phases from low to high temperature", report)}}),
-    describe({.name = "CURVE.HEATING",
-              .says = "A heating curve for a chart: an array of temperature, heat capacity, "
-                      "enthalpy and entropy counted from the start, upright steps at transitions.",
-              .arguments = {{substance,
-                             from_temperature,
-                             to_temperature,
-                             {.name = "points",
-                              .symbol = "points",
-                              .says = "how many equally spaced temperatures, 2 to 10000",
-                              .example = "50"},
-                             {.name = "units",
-                              .symbol = "units",
-                              .says = "a row of four headings with the units; K and SI if left out",
-                              .example = "B4:E4"}}},
-              .forms = {form<curve_heating>("T, cp, ∫cp dT, ∫cp/T dT, transitions included", report,
-                                            "1 bar, the stable phase at each temperature")}}),
+    describe(
+        {.name = "CURVE.HEATING",
+         .says = "A heating curve for a chart: an array of temperature, heat capacity, "
+                 "enthalpy and entropy counted from the start, upright steps at transitions.",
+         .arguments = {{substance,
+                        from_temperature,
+                        to_temperature,
+                        {.name = "points",
+                         .symbol = "points",
+                         .says = "how many equally spaced temperatures, 2 to 10000",
+                         .example = "50"},
+                        {.name = "units",
+                         .symbol = "units",
+                         .says = "a row of four headings with the units; K and SI if left out",
+                         .example = "B4:E4"}}},
+         .forms = {form<curve_heating>("T, cp, ∫cp dT, ∫cp/T dT, transitions included", report,
+                                       "1 bar, the stable phase at each temperature"),
+                   form<own_curve_heating>("T, cp, ∫cp dT, ∫cp/T dT, rows and transitions included",
+                                           "the material as described in the sheet",
+                                           "the range of the material; nothing is extrapolated")}}),
 };
 
 } // namespace

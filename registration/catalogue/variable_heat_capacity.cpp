@@ -74,12 +74,19 @@ core::On<core::HeatCapacity, Basis> own_heat_capacity(OwnMaterialOn<Basis> const
                                                       Temperature temperature, Notes const& notes) {
     return core::materials::heat_capacity<Basis>(*own.material, temperature, notes);
 }
-std::string material_of(AnyOwnMaterial const& own, std::optional<std::string_view> name,
+std::string material_of(MaterialDescription const& given, std::optional<std::string_view> name,
                         std::optional<core::Positive<core::MolarMass>> molar_mass) {
-    core::materials::OwnMaterial material = *own.material;
-    if (name) material.set_name(*name);
-    if (molar_mass) material.set_molar_mass(molar_mass->value);
-    return core::materials::write_material(material);
+    core::materials::Description description = given.description;
+    if (name) description.name = *name;
+    if (molar_mass) {
+        std::erase_if(description.columns,
+                      [](auto const& column) { return column.heading.starts_with("molar mass"); });
+        description.columns.insert(
+            description.columns.begin(),
+            {.heading = "molar mass / (kg/mol)", .numbers = {molar_mass->value.value()}});
+    }
+    static_cast<void>(core::materials::made_of(description)); // refuses what is none
+    return core::materials::write_material(description);
 }
 
 constexpr const char* own_data =

@@ -30,6 +30,11 @@ Range with_spread() {
                          {850.0, 1200.0, 1100.0, Range::blank()}});
 }
 
+void expect_why(const char* function, std::vector<Range> const& arguments, std::string_view part) {
+    const std::string reason = text(call(function, arguments));
+    EXPECT_NE(reason.find(part), std::string::npos) << reason;
+}
+
 TEST(OwnMaterials, ByATableInAnyUnits) {
     EXPECT_NEAR(number(call("ENTHALPY.HEATING", {table(), "300 K", "500 K"})),
                 400 * 200 + 0.25 * 200 * 200, 1e-6);
@@ -105,6 +110,61 @@ TEST(OwnMaterials, AreRefusedWithTheirReason) {
         Range::table({{"T / K", "cp / (J/(kg·K))"}, {300.0, 400.0}, {400.0, "about 500"}});
     EXPECT_EQ(text(call("ENTROPY.HEATING", {words, "300 K", "400 K"})), "#VALUE!");
     EXPECT_EQ(text(call("ENTROPY.HEATING", {"material | nonsense", "300 K", "400 K"})), "#VALUE!");
+}
+
+TEST(OwnMaterials, MoveTheResultByTheUncertaintiesBesideTheirNumbers) {
+    // ∫cp dT of two rows is (T2 - T1)·(cp1 + cp2)/2, so that each row moves it by half.
+    const Range block = Range::table(
+        {{"T / K", "cp / (J/(kg·K))", "u"}, {300.0, 400.0, 8.0}, {400.0, 440.0, "2 %"}});
+    EXPECT_NEAR(number(call("ENTHALPY.HEATING", {block, "300 K", "400 K", Range(), "uncertainty"})),
+                100 * std::hypot(4, 4.4), 1e-6);
+    const std::string one_cell = text(call("MATERIAL.OF", {block, "steel"}));
+    EXPECT_NE(one_cell.find("| u: 8 8.8"), std::string::npos) << one_cell;
+    EXPECT_NEAR(number(call("ENTHALPY.HEATING",
+                            {one_cell.c_str(), "300 K", "400 K", Range(), "uncertainty"})),
+                100 * std::hypot(4, 4.4), 1e-6);
+    // Q = 42 kJ/kg heats from 300 K to 400 K; dT = dQ / cp2.
+    EXPECT_NEAR(
+        number(call("TEMPERATURE.HEATED", {block, "300 K", "41 kJ/kg", Range(), "uncertainty"})),
+        100 * std::hypot(4, 4.4) / 440, 0.05);
+    expect_why("ENTHALPY.HEATING",
+               {Range::table(
+                    {{"T / K", "cp / (J/(kg·K))", "u"}, {300.0, 400.0, -8.0}, {400.0, 440.0, 1.0}}),
+                "300 K", "400 K", Range(), "why"},
+               "0 or more");
+}
+
+TEST(OwnMaterials, AndConstantsInBodiesMoveTheEndByTheirUncertainties) {
+    // T = (c1 T1 + c2 T2) / (c1 + c2); dT/dc1 = (T1 - T) / (c1 + c2).
+    const double u = number(
+        call("TEMPERATURE.EQUALIZED",
+             {Range::column({"1 kJ/(kg·K) ± 0.01 kJ/(kg·K)", "1 kJ/(kg·K)"}),
+              Range::column({"kg", 1.0, 1.0}), Range::column({"K", 400.0, 300.0}), "uncertainty"}));
+    EXPECT_NEAR(u, 0.01 * 50 / 2, 1e-4);
+    const char* steel = "material \"a\" | T / K: 250 500 | cp / (J/(kg·K)): 1000 1000 | u: 10 0";
+    EXPECT_GT(number(call("ENTROPY.EQUALIZING",
+                          {Range::column({steel, "1 kJ/(kg·K)"}), Range::column({"kg", 1.0, 1.0}),
+                           Range::column({"K", 400.0, 300.0}), "uncertainty"})),
+              0);
+}
+
+TEST(OwnMaterials, AreDrawnAsCurvesAndMelt) {
+    const auto curve = call("CURVE.HEATING", {with_melting(), "300 K", "1000 K", 3.0});
+    EXPECT_EQ(curve.rows, 1u + 3 + 2);
+    EXPECT_EQ(curve.columns, 4u);
+    const auto in_kilojoules =
+        call("CURVE.HEATING",
+             {with_melting(), "300 K", "1000 K", 3.0,
+              Range::row({"T / °C", "cp / (kJ/(kg·K))", "h / (kJ/kg)", "s / (kJ/(kg·K))"})});
+    EXPECT_EQ(in_kilojoules.rows, 6u);
+    expect_why("FRACTION.PHASE", {with_melting(), "300 K", "500 kJ/kg", Range(), "ice", "why"},
+               "ice");
+    // 450 kJ/kg to 800 K, then 195 of 390 kJ/kg
+    EXPECT_NEAR(
+        number(call("FRACTION.PHASE", {with_melting(), "300 K", "645 kJ/kg", Range(), "l"})), 0.5,
+        1e-12);
+    EXPECT_NEAR(number(call("FRACTION.PHASE", {with_melting(), "300 K", "1290 kJ", "2 kg", "l"})),
+                0.5, 1e-12);
 }
 
 } // namespace

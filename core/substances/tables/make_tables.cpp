@@ -218,6 +218,17 @@ void read_vapours(Tables& t, std::string const& folder) {
     }
 }
 
+void read_entropy_uncertainties(Tables& t, std::string const& folder) {
+    const Fields columns{"phase_id", "S298_J_per_molK", "printed_uncertainty_J_per_molK",
+                         "obtained_how"};
+    for (Fields const& f : tables::read_rows(folder + "/entropy_uncertainties.csv", columns)) {
+        const auto phase = std::find_if(t.phases.begin(), t.phases.end(),
+                                        [&](Phase const& each) { return each.id == f[0]; });
+        if (phase == t.phases.end() || phase->entropy_u != 0) stop("entropy of " + f[0]);
+        phase->entropy_u = number(f[2]) / 2; // printed for 95 %
+    }
+}
+
 /// Puts the phases of each substance side by side; species.csv has all gases first.
 void gather_phases(Tables& t) {
     std::stable_sort(t.phases.begin(), t.phases.end(),
@@ -373,7 +384,8 @@ void write_rows(Writer& w, Tables const& t) {
     w.array("PhaseRow", "phase_table", t.phases, [&](Phase const& p) {
         w.items(quoted(p.id), quoted(p.name), aggregations[static_cast<int>(p.aggregation)],
                 p.substance, p.first_interval, p.interval_count,
-                digits(number(p.enthalpy_of_formation)), quoted(p.source), quoted(p.note));
+                digits(number(p.enthalpy_of_formation)), digits(p.entropy_u), quoted(p.source),
+                quoted(p.note));
     });
     w.array("View", "view_table", t.views, [&](NamedView const& v) {
         w.items(quoted(v.state), v.substance, v.first_rung, v.rung_count);
@@ -440,6 +452,7 @@ void make(std::string const& folder, std::string const& output) {
     read_species(t, folder);
     read_oxides(t, folder);
     read_vapours(t, folder);
+    read_entropy_uncertainties(t, folder);
     gather_phases(t);
     const auto names = tables::read_rows(folder + "/names.csv", {"name", "substance", "state"});
     std::map<std::string, std::vector<std::string>> states;

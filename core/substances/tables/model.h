@@ -19,6 +19,7 @@ struct Phase {
     Aggregation aggregation{};
     std::size_t substance = 0, first_interval = 0, interval_count = 0;
     std::string enthalpy_of_formation, source, note;
+    double entropy_u = 0;
 };
 
 struct Substance {

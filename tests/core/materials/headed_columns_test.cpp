@@ -127,4 +127,22 @@ TEST(HeadedColumns, RefusesWhatIsNoMaterial) {
     });
 }
 
+TEST(HeadedColumns, TakeUncertaintiesBesideTheirNumbers) {
+    const std::vector<HeadedColumn> with{{.heading = "T / K", .numbers = {300, 400}},
+                                         {.heading = "cp / (J/(kg·K))", .numbers = {460, 480}},
+                                         {.heading = "u", .numbers = {5, 6}}};
+    const std::vector<HeadedColumn> without(with.begin(), with.end() - 1);
+    EXPECT_EQ(read_columns(with).heating(300, 400).entropy,
+              read_columns(without).heating(300, 400).entropy);
+    auto wrong = with;
+    wrong[2].numbers[1] = -6;
+    expect_refusal(unfit, "u = -6", "0 or more", [&] { read_columns(wrong); });
+    wrong = {with[2], with[0], with[1]};
+    expect_refusal(unfit, "a column headed `u`", "the column before it",
+                   [&] { read_columns(wrong); });
+    wrong = {with[0], with[1], with[2], with[2]};
+    expect_refusal(unfit, "a column headed `u`", "the column before it",
+                   [&] { read_columns(wrong); });
+}
+
 } // namespace

@@ -7,6 +7,9 @@
 #include <gtest/gtest.h>
 #include <rapidcheck/gtest.h>
 
+#include <algorithm>
+#include <limits>
+
 namespace {
 
 using namespace core;
@@ -14,25 +17,24 @@ using namespace core::materials;
 using random_states::between;
 
 TEST(MaterialText, IsReadableByPeople) {
-    OwnMaterial steel = OwnMaterial::measured(Basis::specific, {300, 400, 500.5}, {460, 480, 0.1});
-    steel.set_name("steel A");
-    EXPECT_EQ(write_material(steel),
-              "material \"steel A\" | T / K: 300 400 500.5 | cp / (J/(kg·K)): 460 480 0.1");
-    OwnMaterial alloy = OwnMaterial::correlated(
-        Basis::molar, {{300, 900, {{0, 25}, {-0.5, 1e-10}}, 9000, 0, "cr, α"},
-                       {900, 950, {{0, 30}}, 0, 500, ""},
-                       {950, 1e4, {{0, 31}, {1, 2}}, 0, 0, "l"}});
-    alloy.set_molar_mass(MolarMass::from_value(0.02698));
-    EXPECT_EQ(write_material(alloy),
-              "material | molar mass / (kg/mol): 0.02698 | from / K: 300 900 950 | to / K: 900 950 "
-              "10000 | T^0 / (J/(mol·K)): 25 30 31 | T^-0.5 / (J/(mol·K)): 1e-10 0 0 | T^1 / "
-              "(J/(mol·K)): 0 0 2 | transition / (J/mol): 9000 0 0 | spread / (J/mol): 0 500 0 | "
-              "phase: \"cr, α\" \"\" \"l\"");
-    const OwnMaterial whole = OwnMaterial::correlated(
-        Basis::total, {{300, 900, {{0, 25}}, 9000, 0, ""}, {900, 950, {{0, 30}}, 0, 0, ""}});
-    EXPECT_EQ(write_material(whole),
-              "material | from / K: 300 900 | to / K: 900 950 | T^0 / (J/K): "
-              "25 30 | transition / J: 9000 0");
+    EXPECT_EQ(write_material({"steel A",
+                              {{.heading = "T / °C", .numbers = {300, 400, 500.5}},
+                               {.heading = "cp / (kJ/(kg·K))", .numbers = {460, 480, 0.1}}}}),
+              "material \"steel A\" | T / °C: 300 400 500.5 | cp / (kJ/(kg·K)): 460 480 0.1");
+    constexpr double blank = std::numeric_limits<double>::quiet_NaN();
+    EXPECT_EQ(
+        write_material({"",
+                        {{.heading = "molar mass / (kg/mol)", .numbers = {0.02698}},
+                         {.heading = "from / K", .numbers = {300, blank, 900, 950}},
+                         {.heading = "to / K", .numbers = {900, blank, 950, 1e4}},
+                         {.heading = "T^0 / (J/(mol·K))", .numbers = {25, blank, 30, 31}},
+                         {.heading = "u", .numbers = {0.5, blank, blank, 1}},
+                         {.heading = "T^-0.5", .numbers = {1e-10, blank, 0, 0}},
+                         {.heading = "transition / (J/mol)", .numbers = {9000, blank, blank, 0}},
+                         {.heading = "phase", .words = {"cr, α", "", "", "l"}}}}),
+        "material | molar mass / (kg/mol): 0.02698 | from / K: 300 900 950 | to / K: 900 950 10000 "
+        "| T^0 / (J/(mol·K)): 25 30 31 | u: 0.5 0 1 | T^-0.5: 1e-10 0 0 | transition / (J/mol): "
+        "9000 0 0 | phase: \"cr, α\" \"\" \"l\"");
 }
 
 TEST(MaterialText, IsReadInTheUnitsItStates) {
@@ -42,26 +44,16 @@ TEST(MaterialText, IsReadInTheUnitsItStates) {
     EXPECT_EQ(m.name(), "x");
 }
 
-bool same(OwnMaterial const& a, OwnMaterial const& b) {
-    const auto rows_agree = [](CorrelationRow const& x, CorrelationRow const& y) {
-        return x.from == y.from && x.to == y.to && x.transition == y.transition &&
-               x.spread == y.spread && x.phase == y.phase &&
-               std::equal(x.terms.begin(), x.terms.end(), y.terms.begin(), y.terms.end(),
-                          [](Term const& s, Term const& t) {
-                              return s.exponent == t.exponent && s.coefficient == t.coefficient;
-                          });
-    };
-    return a.basis() == b.basis() && a.name() == b.name() && a.molar_mass() == b.molar_mass() &&
-           std::equal(a.temperatures().begin(), a.temperatures().end(), b.temperatures().begin(),
-                      b.temperatures().end()) &&
-           std::equal(a.heat_capacities().begin(), a.heat_capacities().end(),
-                      b.heat_capacities().begin(), b.heat_capacities().end()) &&
-           std::equal(a.rows().begin(), a.rows().end(), b.rows().begin(), b.rows().end(),
-                      rows_agree);
+bool same(Description const& a, Description const& b) {
+    return a.name == b.name &&
+           std::ranges::equal(a.columns, b.columns, [](auto const& x, auto const& y) {
+               return x.heading == y.heading && x.numbers == y.numbers && x.words == y.words;
+           });
 }
 
-Basis any_basis() {
-    return *rc::gen::elementOf(std::vector{Basis::molar, Basis::specific, Basis::total});
+std::string_view any_heat_capacity_unit() {
+    return *rc::gen::elementOf(
+        std::vector<std::string_view>{"(J/(mol·K))", "(J/(kg·K))", "J/K", "(cal_th/(g·K))"});
 }
 
 RC_GTEST_PROP(MaterialText, OfATableReadsBackToTheSameBits, ()) {
@@ -72,31 +64,46 @@ RC_GTEST_PROP(MaterialText, OfATableReadsBackToTheSameBits, ()) {
         t.push_back(jump ? t.back() : t.back() + between(1e-3, 300));
         cp.push_back(between(1e-3, 1e6));
     }
-    OwnMaterial m = OwnMaterial::measured(any_basis(), t, cp);
-    if (*rc::gen::arbitrary<bool>()) m.set_name("Gußstück | № 7: a");
-    if (*rc::gen::arbitrary<bool>()) m.set_molar_mass(MolarMass::from_value(between(1e-3, 1)));
-    const OwnMaterial again = read_material(write_material(m));
-    RC_ASSERT(same(m, again));
-    RC_ASSERT(write_material(again) == write_material(m));
+    const std::string heading = "cp / " + std::string(any_heat_capacity_unit());
+    Description d{"", {{.heading = "T / K", .numbers = t}, {.heading = heading, .numbers = cp}}};
+    if (*rc::gen::arbitrary<bool>()) d.name = "Gußstück | № 7: a";
+    if (*rc::gen::arbitrary<bool>()) d.columns.push_back({.heading = "u", .numbers = cp});
+    if (*rc::gen::arbitrary<bool>())
+        d.columns.push_back({.heading = "molar mass / (kg/mol)", .numbers = {between(1e-3, 1)}});
+    const std::string text = write_material(d);
+    RC_ASSERT(same(read_description(text), d));
+    const OwnMaterial m = made_of(d), again = read_material(text);
     RC_ASSERT(again.heating(m.from(), m.to()).entropy == m.heating(m.from(), m.to()).entropy);
 }
 
 RC_GTEST_PROP(MaterialText, OfACorrelationReadsBackToTheSameBits, ()) {
-    std::vector<CorrelationRow> rows;
-    double from = between(10, 500);
-    const std::vector<double> exponents{0, 1, -2, -0.5, between(0.1, 3), -between(1e-7, 2)};
-    for (int count = *rc::gen::inRange(1, 6); count > 0; --count) {
-        CorrelationRow row{from, from * (1 + between(1e-2, 2)), {}, 0, 0, ""};
-        for (const double n : exponents) row.terms.push_back({n, between(1e-12, 1e3)});
-        if (count > 1) row.transition = between(1e-3, 1e6);
-        row.spread = between(1e-3, 1e6);
-        row.phase = *rc::gen::elementOf(std::vector<std::string>{"", "cr", "cr, α", "l"});
-        from = row.to;
-        rows.push_back(row);
+    const std::vector<std::string> exponents{"0", "1", "-2", "-0.5", "0.37", "-1e-7"};
+    const auto count = static_cast<std::size_t>(*rc::gen::inRange(1, 6));
+    std::vector<double> from{between(10, 500)}, to, latent, spread;
+    std::vector<std::string_view> phases;
+    for (std::size_t row = 0; row < count; ++row) {
+        to.push_back(from.back() * (1 + between(1e-2, 2)));
+        if (row + 1 < count) from.push_back(to.back());
+        latent.push_back(row + 1 < count ? between(1e-3, 1e6) : 0);
+        spread.push_back(between(1e-3, 1e6));
+        phases.push_back(*rc::gen::elementOf(std::vector<std::string_view>{"", "cr, α", "l"}));
     }
-    const OwnMaterial m = OwnMaterial::correlated(any_basis(), rows);
-    const OwnMaterial again = read_material(write_material(m));
-    RC_ASSERT(same(m, again));
+    std::vector<std::string> headings;
+    for (auto const& n : exponents) headings.push_back("T^" + n + " / (J/(mol·K))");
+    Description d{"",
+                  {{.heading = "from / K", .numbers = from},
+                   {.heading = "to / K", .numbers = to},
+                   {.heading = "transition / (J/mol)", .numbers = latent},
+                   {.heading = "spread / (J/mol)", .numbers = spread},
+                   {.heading = "phase", .words = phases}}};
+    for (auto const& heading : headings) {
+        std::vector<double> a;
+        for (std::size_t row = 0; row < count; ++row) a.push_back(between(1e-12, 1e3));
+        d.columns.push_back({.heading = heading, .numbers = a});
+    }
+    const std::string text = write_material(d);
+    RC_ASSERT(same(read_description(text), d));
+    const OwnMaterial m = made_of(d), again = read_material(text);
     RC_ASSERT(again.heating(m.from(), m.to()).entropy == m.heating(m.from(), m.to()).entropy);
 }
 
@@ -143,8 +150,19 @@ TEST(MaterialText, IsNotWrittenLongerThanItCanBeRead) {
         t.push_back(300 + i / 3.0);
         cp.push_back(25);
     }
-    expect_refusal(unfit, "a text of", "32000 bytes",
-                   [&] { write_material(OwnMaterial::measured(Basis::molar, t, cp)); });
+    expect_refusal(unfit, "a text of", "32000 bytes", [&] {
+        write_material(
+            {"", {{.heading = "T / K", .numbers = t}, {.heading = "cp / (J/K)", .numbers = cp}}});
+    });
+}
+
+TEST(MaterialText, IsNotWrittenWithWhatWouldEndATextInside) {
+    expect_refusal(unfit, "T: K", "a text without any of", [] {
+        write_material({"", {{.heading = "T: K", .numbers = {1.0}}}});
+    });
+    expect_refusal(unfit, "cr\"", "a text without any of", [] {
+        write_material({"", {{.heading = "phase", .words = {"cr\""}}}});
+    });
 }
 
 /// Any bytes, or pieces of the language in any order.
@@ -192,7 +210,8 @@ RC_GTEST_PROP(MaterialText, OfAnyKindIsReadOrRefused, ()) {
         const OwnMaterial m = read_material(text);
         const Change change = m.heating(m.from(), m.to());
         RC_ASSERT(std::isfinite(change.enthalpy) && std::isfinite(change.entropy));
-        RC_ASSERT(same(read_material(write_material(m)), m));
+        const Description d = read_description(text);
+        RC_ASSERT(same(read_description(write_material(d)), d));
     } catch (Failure const& failure) {
         RC_ASSERT(!failure.needed.empty());
         RC_ASSERT(!failure.repair.empty());

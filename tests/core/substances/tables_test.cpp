@@ -1,4 +1,5 @@
 // SPDX-License-Identifier: MPL-2.0
+#include "core/substances/substance.h"
 #include "core/substances/table.h"
 
 #include "tests/published/table.h"
@@ -85,6 +86,23 @@ TEST(SubstanceTables, HoldEveryRowOfTheReport) {
         EXPECT_EQ(p.aggregation == Aggregation::gas, row.text("phase_kind") == "gas");
         EXPECT_EQ(p.aggregation == Aggregation::liquid, row.text("phase_kind") == "liquid");
     }
+}
+
+// A key value's uncertainty is used only where the report has its entropy within it.
+TEST(SubstanceTables, HoldTheUncertaintiesOfTheEntropiesTheyBelongTo) {
+    std::size_t held = 0;
+    for (Row const& row : published::read_table(
+             TABLES_DIR "/entropy_uncertainties.csv",
+             {"phase_id", "S298_J_per_molK", "printed_uncertainty_J_per_molK", "obtained_how"},
+             43)) {
+        PhaseRow const& p = phase(row.text("phase_id"));
+        EXPECT_EQ(p.entropy_u, row.number("printed_uncertainty_J_per_molK") / 2) << p.id;
+        EXPECT_NEAR(Phase(p).entropy(core::Temperature::kelvin(298.15)).value(),
+                    row.number("S298_J_per_molK"), row.number("printed_uncertainty_J_per_molK"))
+            << p.id;
+    }
+    for (PhaseRow const& p : phase_rows()) held += p.entropy_u > 0;
+    EXPECT_EQ(held, 43u);
 }
 
 TEST(SubstanceTables, HoldTheOxides) {

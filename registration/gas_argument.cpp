@@ -1,0 +1,307 @@
+// SPDX-License-Identifier: MPL-2.0
+#include "registration/gas_argument.h"
+
+#include "core/text/characters.h"
+#include "core/text/number.h"
+#include "core/text/quantity.h"
+#include "core/written.h"
+
+#include <cmath>
+#include <optional>
+
+namespace registration {
+namespace {
+
+using core::substances::Component;
+using core::substances::Gas;
+
+constexpr std::size_t most_components = 50;
+constexpr double fractions_tolerance = 1e-6;
+
+bool is_text(Cell const& cell) { return cell.kind == Cell::Kind::text; }
+
+bool is_rest(Cell const& cell) { return is_text(cell) && cell.text == "rest"; }
+
+/// `21 mol%`, `(21 ± 1) mol%`; neither a substance nor a unit begins so.
+bool begins_with_number(std::string_view text) {
+    core::text::Cursor at(text);
+    at.take(U'(');
+    return core::text::starts_number(at);
+}
+
+bool is_name(Cell const& cell) {
+    return is_text(cell) && !begins_with_number(cell.text) && !is_rest(cell);
+}
+
+/// What stands beside a substance: a number, a quantity, `rest`.
+bool is_share(Cell const& cell) {
+    return cell.kind == Cell::Kind::number || is_rest(cell) || (is_text(cell) && !is_name(cell));
+}
+
+/// A block seen upright.
+struct Sheet {
+    Block block;
+    bool across;
+
+    std::size_t rows() const { return across ? block.columns : block.rows; }
+    std::size_t columns() const { return across ? block.rows : block.columns; }
+    Cell const& at(std::size_t row, std::size_t column) const {
+        return across ? block.at(column, row) : block.at(row, column);
+    }
+    /// Its last row has a name and a share side by side.
+    bool fits() const {
+        if (columns() < 2 || columns() > 3 || rows() < 1) return false;
+        std::size_t last = rows() - 1;
+        while (last > 0 && at(last, 0).kind == Cell::Kind::blank) --last;
+        return is_name(at(last, 0)) && is_share(at(last, 1));
+    }
+};
+
+std::optional<Sheet> sheet_of(Given const& given) {
+    if (given.missing() || given.block().single()) return std::nullopt;
+    for (const bool across : {false, true})
+        if (const Sheet sheet{given.block(), across}; sheet.fits()) return sheet;
+    return std::nullopt;
+}
+
+enum class Kind : std::uint8_t { mole_fractions, mass_fractions, moles, masses };
+
+Kind kind_of(Unit const& unit, std::string_view text) {
+    if (unit.dimension == core::Dimension{})
+        return unit.share == Share::mass ? Kind::mass_fractions : Kind::mole_fractions;
+    if (unit.dimension == core::dimension<core::AmountOfSubstance> ||
+        unit.dimension == core::dimension<core::MolarFlow>)
+        return Kind::moles;
+    if (unit.dimension == core::dimension<core::Mass> ||
+        unit.dimension == core::dimension<core::MassFlow>)
+        return Kind::masses;
+    core::refuse_unfit(std::string(text), "fractions or amounts beside the gases of a mixture",
+                       "give them in mol%, vol%, wt%, mol, kg, mol/s or kg/h");
+}
+
+/// One row of a mixture as it stands.
+struct Part {
+    core::substances::Substance gas;
+    double share = 0; ///< SI
+    double u = 0;     ///< SI
+    bool rest = false;
+};
+
+/// Reads the block: the unit of its heading, or of each row.
+class Mixture {
+public:
+    Mixture(Sheet sheet, core::Notes const& notes) : sheet_(sheet) {
+        std::size_t row = 0;
+        if (is_text(sheet.at(0, 1)) && !is_share(sheet.at(0, 1))) read_heading(sheet.at(row++, 1));
+        for (; row < sheet.rows(); ++row)
+            if (sheet.at(row, 0).kind != Cell::Kind::blank ||
+                sheet.at(row, 1).kind != Cell::Kind::blank)
+                read_row(row, notes);
+        if (parts_.empty())
+            core::refuse_unfit("a block without gases", "gases beside their fractions",
+                               "fill the block");
+        if (parts_.size() > most_components)
+            core::refuse_unfit(std::to_string(parts_.size()) + " gases", "at most 50 of them",
+                               "leave the traces out");
+    }
+
+    std::vector<Part> const& parts() const { return parts_; }
+
+    void move(std::optional<MovedPlace> const& moved) {
+        if (moved) parts_[moved->place.row].share += moved->times * moved->place.u;
+        moved_ = moved.has_value();
+    }
+
+    Gas made() {
+        fill_rest();
+        double sum = 0;
+        for (Part const& part : parts_) {
+            if (!(part.share >= 0))
+                core::refuse_impossible(core::written(part.share) + " of " + part.gas.written(),
+                                        "fractions and amounts of 0 or more", "check the signs");
+            sum += part.share;
+        }
+        check_sum(sum);
+        std::vector<Component> components;
+        double moles = 0;
+        for (Part const& part : parts_) {
+            const double n = is_of_mass() ? part.share / part.gas.molar_mass().value() : part.share;
+            components.push_back({part.gas, n});
+            moles += n;
+        }
+        for (Component& each : components) each.fraction /= moles;
+        core::substances::check_each_once(components);
+        return Gas(std::move(components));
+    }
+
+private:
+    bool is_of_mass() const { return kind_ == Kind::mass_fractions || kind_ == Kind::masses; }
+    bool is_fractions() const {
+        return kind_ == Kind::mole_fractions || kind_ == Kind::mass_fractions;
+    }
+
+    void read_heading(Cell const& cell) {
+        unit_ = core::text::read_heading(cell.text).unit;
+        kind_ = kind_of(*unit_, cell.text);
+    }
+
+    void read_row(std::size_t row, core::Notes const& notes) {
+        Cell const& name = sheet_.at(row, 0);
+        if (!is_text(name))
+            core::refuse_unfit("row " + std::to_string(row + 1) + " without a gas",
+                               "a gas in every row", "write the gas, or clear the row");
+        Part part{core::substances::read_component(name.text, notes)};
+        Cell const& share = sheet_.at(row, 1);
+        if (share.kind == Cell::Kind::blank)
+            core::refuse_unfit(std::string(name.text) + " without a fraction or amount",
+                               "one beside every gas", "fill the cell in, or clear the row");
+        if (is_rest(share))
+            part.rest = true;
+        else if (share.kind == Cell::Kind::number)
+            part.share = unit_ ? unit_->to_si(share.number) : share.number;
+        else
+            read_quantity(share, part);
+        if (sheet_.columns() == 3) read_uncertainty(sheet_.at(row, 2), part);
+        parts_.push_back(part);
+    }
+
+    void read_quantity(Cell const& cell, Part& part) {
+        const auto read = core::text::read_quantity(cell.text);
+        if (unit_) {
+            if (!read.bare)
+                core::refuse_unfit(std::string(cell.text), "a number in the unit of the heading",
+                                   "write the number without a unit");
+            part.share = unit_->to_si(read.si);
+            part.u = unit_->span_to_si(read.u);
+            return;
+        }
+        const Kind kind = kind_of(read.unit, cell.text);
+        for (Part const& other : parts_)
+            if (kind != kind_ && !other.rest)
+                core::refuse_unfit(std::string(cell.text),
+                                   "fractions or amounts of one kind in all rows",
+                                   "give all of them in one unit");
+        kind_ = kind;
+        part.share = read.si;
+        part.u = read.u;
+    }
+
+    void read_uncertainty(Cell const& cell, Part& part) const {
+        const Unit unit = unit_.value_or(Unit{});
+        if (is_text(cell))
+            part.u = core::text::read_uncertainty(cell.text, part.share, unit);
+        else if (cell.kind == Cell::Kind::number)
+            part.u = unit.span_to_si(cell.number);
+        if (!(part.u >= 0) || (part.u > 0 && part.rest))
+            core::refuse_unfit(part.rest ? "u of the rest" : "u below 0",
+                               "standard uncertainties of 0 or more; the rest takes up the others'",
+                               "correct the column `u`");
+    }
+
+    void fill_rest() {
+        Part* rest = nullptr;
+        double others = 0;
+        for (Part& part : parts_) {
+            if (part.rest && rest)
+                core::refuse_unfit("`rest` twice", "one rest at most", "write the other as number");
+            if (part.rest)
+                rest = &part;
+            else
+                others += part.share;
+        }
+        if (!rest) return;
+        if (!is_fractions())
+            core::refuse_unfit("`rest` among amounts", "an amount in every row",
+                               "write the amount, or give fractions");
+        has_rest_ = true;
+        rest->share = 1 - others;
+    }
+
+    /// A moved fraction moves the sum; the others then take it up together.
+    void check_sum(double sum) const {
+        if (!(sum > 0))
+            core::refuse_impossible("a sum of " + core::written(sum), "a mixture of something",
+                                    "check the amounts");
+        if (is_fractions() && !has_rest_ && !moved_ && std::abs(sum - 1) > fractions_tolerance)
+            core::refuse_unfit("a sum of " + core::written(sum),
+                               "fractions that sum to 1 within 1e-6",
+                               "check the fractions, or write `rest` for one of them");
+    }
+
+    Sheet sheet_;
+    std::optional<Unit> unit_;
+    Kind kind_ = Kind::mole_fractions;
+    bool has_rest_ = false, moved_ = false;
+    std::vector<Part> parts_;
+};
+
+/// The two sides of `air, cp = 1.005 kJ/(kg·K)`.
+struct Split {
+    std::string_view gas, heat_capacity;
+};
+std::optional<Split> split(std::string_view text) {
+    const std::size_t equals = text.find('=');
+    if (equals == std::string_view::npos) return std::nullopt;
+    const std::size_t comma = text.substr(0, equals).rfind(',');
+    if (comma == std::string_view::npos) return std::nullopt;
+    std::string_view word = text.substr(comma + 1, equals - comma - 1);
+    while (word.starts_with(' ')) word.remove_prefix(1);
+    while (word.ends_with(' ')) word.remove_suffix(1);
+    if (word != "cp") return std::nullopt;
+    return Split{text.substr(0, comma), text.substr(equals + 1)};
+}
+
+} // namespace
+
+bool means_mixture(Given const& given) { return sheet_of(given).has_value(); }
+
+Gas read_gas_argument(Given const& given, std::size_t row, core::Notes const& notes) {
+    const auto sheet = sheet_of(given);
+    if (!sheet) return core::substances::read_gas(given.cell(row).text, notes);
+    Mixture mixture(*sheet, notes);
+    mixture.move(given.moved_place());
+    return mixture.made();
+}
+
+bool means_constant_gas(std::string_view text) { return split(text).has_value(); }
+
+ConstantGas read_constant_gas(Given const& given, std::size_t row, core::Notes const& notes) {
+    const std::string_view text = given.cell(row).text;
+    const auto parts = split(text);
+    if (!parts)
+        core::refuse_unfit(std::string(text), "a gas with its heat capacity",
+                           "write it as `air, cp = 1.005 kJ/(kg·K)`");
+    const Gas gas = core::substances::read_gas(parts->gas, notes);
+    auto read = core::text::read_quantity(parts->heat_capacity);
+    if (auto const& moved = given.moved_place(); moved && moved->place.cell == row)
+        read.si += moved->times * moved->place.u;
+    if (!read.note.empty()) notes.remark([&] { return read.note; });
+    const bool specific = read.unit.dimension == core::dimension<core::SpecificHeatCapacity>;
+    if (!specific && read.unit.dimension != core::dimension<core::MolarHeatCapacity>)
+        core::refuse_unfit(std::string(parts->heat_capacity),
+                           "a molar or specific heat capacity behind `cp =`",
+                           "write it as `air, cp = 1.005 kJ/(kg·K)`");
+    if (!(read.si > 0))
+        core::refuse_impossible(std::string(parts->heat_capacity), "a heat capacity above 0",
+                                "check the sign");
+    const double molar = specific ? read.si * gas.molar_mass().value() : read.si;
+    return {gas, core::MolarHeatCapacity::from_value(molar), read.unit.dimension};
+}
+
+std::vector<Place> uncertain_places_of_gas(Given const& given) {
+    std::vector<Place> places;
+    if (const auto sheet = sheet_of(given)) {
+        const Mixture mixture(*sheet, core::silent);
+        for (std::size_t row = 0; row < mixture.parts().size(); ++row)
+            if (const double u = mixture.parts()[row].u; u > 0) places.push_back({0, 0, row, u});
+        return places;
+    }
+    for (std::size_t row = 0; row < given.cell_count(); ++row)
+        if (const auto parts = split(given.cell(row).text)) {
+            const double u = core::text::read_quantity(parts->heat_capacity).u;
+            if (u > 0) places.push_back({row, 0, 0, u});
+        }
+    return places;
+}
+
+} // namespace registration
