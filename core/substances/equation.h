@@ -24,6 +24,16 @@ struct Interval {
 
 namespace detail {
 
+/// Multiplied by instead of divided by, which takes a fifth of the time.
+template<class Real>
+inline const Real one_third = Real(1) / 3;
+template<class Real>
+inline const Real one_fifth = Real(1) / 5;
+template<>
+inline constexpr double one_third<double> = 1.0 / 3;
+template<>
+inline constexpr double one_fifth<double> = 1.0 / 5;
+
 /// c0 + c1 t + c2 t^2 + c3 t^3 + c4 t^4 by Horner's rule.
 template<class Real>
 Real polynomial(Real const& t, Real c0, Real c1, Real c2, Real c3, Real c4) {
@@ -86,9 +96,10 @@ Real gibbs_of(Interval const& i, Real const& t) {
 template<class Real>
 Real enthalpy_between(Interval const& i, Real const& t1, Real const& t2) {
     using std::sqrt;
-    Real slope = i.a1 / (t1 * t2) + detail::divided_difference<Real>(t2, t1, i.a3, Real(i.a4) / 2,
-                                                                     Real(i.a5) / 3, Real(i.a6) / 4,
-                                                                     Real(i.a7) / 5);
+    Real slope = i.a1 / (t1 * t2) +
+                 detail::divided_difference<Real>(t2, t1, i.a3, Real(i.a4) / 2,
+                                                  i.a5 * detail::one_third<Real>, Real(i.a6) / 4,
+                                                  i.a7 * detail::one_fifth<Real>);
     if (i.root != 0) slope += 2 * i.root / (sqrt(t1) + sqrt(t2));
     Real sum = (t2 - t1) * slope;
     if (i.a2 != 0) sum += i.a2 * detail::ln_quotient(t2, t1);
@@ -100,9 +111,10 @@ template<class Real>
 Real entropy_between(Interval const& i, Real const& t1, Real const& t2) {
     using std::sqrt;
     const Real product = t1 * t2;
-    Real slope = (i.a1 * (t1 + t2) / (2 * product) + i.a2) / product +
-                 detail::divided_difference<Real>(t2, t1, i.a4, Real(i.a5) / 2, Real(i.a6) / 3,
-                                                  Real(i.a7) / 4, Real(0));
+    Real slope =
+        (i.a1 * (t1 + t2) / (2 * product) + i.a2) / product +
+        detail::divided_difference<Real>(t2, t1, i.a4, Real(i.a5) / 2,
+                                         i.a6 * detail::one_third<Real>, Real(i.a7) / 4, Real(0));
     if (i.root != 0) slope += 2 * i.root / (sqrt(product) * (sqrt(t1) + sqrt(t2)));
     return i.gas_constant * ((t2 - t1) * slope + i.a3 * detail::ln_quotient(t2, t1));
 }

@@ -55,15 +55,9 @@ void tell_transition(Rung const& below, Rung const& above, Notes const& notes) {
                " K: ΔH = " + written(MolarEnergy::from_value(above.enthalpy_jump)) +
                ", ΔS = " + written(MolarEntropy::from_value(above.entropy_jump));
     });
-    if (is_boiling(below, above))
-        notes.remark([&] {
-            return "passes from " + name(below) + " to g at " + written(above.from) +
-                   " K, at 1 bar";
-        });
 }
 
-void refuse_gap(Substance const& substance, Rung const& below, Rung const& above) {
-    if (!above.gap) return;
+[[noreturn]] void refuse_gap(Substance const& substance, Rung const& below, Rung const& above) {
     refuse_impossible(substance.written(),
                       "a heating without the gap from " + written(below.to) + " to " +
                           written(above.from) + " K, where nothing is tabulated",
@@ -82,34 +76,47 @@ struct Path {
     double begin, end;
 };
 
+/// Σ over the rungs of a path.
 template<class Taken>
-double taken_up_in(Rung const& rung, double begin, double end) {
-    return begin == rung.from && end == rung.to ? Taken::across(rung)
-                                                : Taken::between(interval_of(rung), begin, end);
+double taken_up(Path const& path) {
+    Rung const *first = &path.rungs[path.first], *last = &path.rungs[path.last];
+    if (first == last) return Taken::between(interval_of(*last), path.begin, path.end);
+    double sum = Taken::between(interval_of(*first), path.begin, first->to);
+    for (Rung const* rung = first + 1; rung <= last; ++rung) {
+        if (rung->gap) refuse_gap(path.substance, *(rung - 1), *rung);
+        sum += Taken::jump(*rung);
+        if (rung != last) sum += Taken::across(*rung);
+    }
+    return sum + Taken::between(interval_of(*last), last->from, path.end);
 }
 
-/// Σ over the rungs of a path, steps told as it goes.
+/// The same, a step for each stretch of one phase and each transition.
 template<class Taken>
-double taken_up(Path const& path, Notes const& notes) {
-    double sum = 0, part = 0, phase_begin = path.begin, begin = path.begin;
-    for (std::size_t i = path.first; i < path.last; ++i) {
-        Rung const &rung = path.rungs[i], &next = path.rungs[i + 1];
-        refuse_gap(path.substance, rung, next);
-        part += taken_up_in<Taken>(rung, begin, rung.to);
-        begin = rung.to;
-        if (rung.phase == next.phase) {
-            part += Taken::jump(next);
+void tell_stretches(Path const& path, Notes const& notes) {
+    double part = 0, phase_begin = path.begin, begin = path.begin;
+    for (std::size_t i = path.first; i <= path.last; ++i) {
+        Rung const& rung = path.rungs[i];
+        const double end = i == path.last ? path.end : rung.to;
+        part += Taken::between(interval_of(rung), begin, end);
+        begin = end;
+        if (i < path.last && rung.phase == path.rungs[i + 1].phase) {
+            part += Taken::jump(path.rungs[i + 1]);
             continue;
         }
-        tell_stretch<Taken>(rung, phase_begin, begin, part, notes);
-        tell_transition(rung, next, notes);
-        sum += part + Taken::jump(next);
+        tell_stretch<Taken>(rung, phase_begin, end, part, notes);
+        if (i < path.last) tell_transition(rung, path.rungs[i + 1], notes);
         part = 0;
-        phase_begin = begin;
+        phase_begin = end;
     }
-    part += taken_up_in<Taken>(path.rungs[path.last], begin, path.end);
-    tell_stretch<Taken>(path.rungs[path.last], phase_begin, path.end, part, notes);
-    return sum + part;
+}
+
+void remark_boilings(Path const& path, Notes const& notes) {
+    for (std::size_t i = path.first; i < path.last; ++i)
+        if (Rung const& below = path.rungs[i], &above = path.rungs[i + 1]; is_boiling(below, above))
+            notes.remark([&] {
+                return "passes from " + name(below) + " to g at " + written(above.from) +
+                       " K, at 1 bar";
+            });
 }
 
 void remark_notes(Path const& path, Notes const& notes) {
@@ -142,18 +149,24 @@ void remark_near(Path const& path, std::size_t rung, double t, Notes const& note
     }
 }
 
+void remark_path(Path const& path, Notes const& notes) {
+    remark_boilings(path, notes);
+    remark_notes(path, notes);
+    remark_near(path, path.first, path.begin, notes);
+    if (path.begin != path.end) remark_near(path, path.last, path.end, notes);
+}
+
 template<class Taken>
 typename Taken::Quantity heated(Substance const& substance, Temperature from, Temperature to,
                                 Notes const& notes) {
     const bool cooling = to < from;
     const Path path(substance, cooling ? to : from, cooling ? from : to);
-    const double sum = taken_up<Taken>(path, notes);
+    const double sum = taken_up<Taken>(path);
     const auto result = Taken::Quantity::from_value(cooling ? -sum : sum);
+    if (notes.hears_steps()) tell_stretches<Taken>(path, notes);
     notes.step(
         [&] { return (cooling ? "sum, negative for cooling: " : "sum: ") + written(result); });
-    remark_notes(path, notes);
-    remark_near(path, path.first, path.begin, notes);
-    if (path.begin != path.end) remark_near(path, path.last, path.end, notes);
+    if (notes.hears_remarks()) remark_path(path, notes);
     return result;
 }
 
@@ -170,9 +183,7 @@ MolarEnergy enthalpy_of_heating(Substance const& substance, Temperature from, Te
 }
 
 void remark_state(Substance const& substance, Temperature t, Notes const& notes) {
-    const Path path(substance, t, t);
-    remark_notes(path, notes);
-    remark_near(path, path.first, path.begin, notes);
+    if (notes.hears_remarks()) remark_path(Path(substance, t, t), notes);
 }
 
 MolarHeatCapacity heat_capacity(Substance const& substance, Temperature temperature,

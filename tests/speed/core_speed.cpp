@@ -4,13 +4,10 @@
 #include "core/text/quantity.h"
 #include "registration/call.h"
 #include "registration/catalogue/catalogue.h"
-
-#include <benchmark/benchmark.h>
+#include "tests/speed/medians.h"
 
 #include <array>
 #include <cmath>
-#include <cstdio>
-#include <map>
 #include <string>
 #include <vector>
 
@@ -113,47 +110,17 @@ BENCHMARK(whole_call);
 BENCHMARK(column_call);
 BENCHMARK(gas_column_call);
 
-/// Keeps the median of each benchmark and prints what the aims speak of.
-class Ratios : public benchmark::ConsoleReporter {
-public:
-    void ReportRuns(std::vector<Run> const& runs) override {
-        ConsoleReporter::ReportRuns(runs);
-        for (Run const& run : runs)
-            if (run.aggregate_name == "median")
-                seconds_[run.run_name.function_name] = run.GetAdjustedRealTime() * 1e-9;
-    }
-    void print() {
-        const auto ratio = [&](const char* what, const char* a, const char* b, double aim) {
-            std::printf("%-62s %6.2f   aim %.2f\n", what, seconds_[a] / seconds_[b], aim);
-        };
-        const auto time = [&](const char* what, const char* a, double aim) {
-            std::printf("%-62s %6.3f µs aim %.3f\n", what, seconds_[a] * 1e6, aim);
-        };
-        ratio("typed core / raw doubles, ΔH / T", "typed_fusion_rows", "raw_fusion_rows", 1);
-        ratio("typed core / raw doubles, entropy of a gas", "typed_gas_rows", "raw_gas_rows", 1);
-        time("one text quantity read", "read_text", 0.1);
-        time("one whole call, value | unit twice and a show", "whole_call", 0.1);
-        ratio("row of a column call / core, ΔH / T (one division)", "column_call",
-              "typed_fusion_rows", 1.5);
-        ratio("row of a column call / core, entropy of a gas", "gas_column_call", "typed_gas_rows",
-              1.5);
-    }
-
-private:
-    std::map<std::string, double> seconds_;
-};
-
 } // namespace
 
 int main(int argc, char** argv) {
-    // The ratios are of medians, so there must be some runs to take them of.
-    std::vector<char*> arguments(argv, argv + argc);
-    std::string repetitions = "--benchmark_repetitions=5",
-                aggregates = "--benchmark_report_aggregates_only=true";
-    arguments.insert(arguments.begin() + 1, {repetitions.data(), aggregates.data()});
-    int count = static_cast<int>(arguments.size());
-    benchmark::Initialize(&count, arguments.data());
-    Ratios reporter;
-    benchmark::RunSpecifiedBenchmarks(&reporter);
-    reporter.print();
+    const speed::Medians medians(argc, argv);
+    medians.ratio("typed core / raw doubles, ΔH / T", "typed_fusion_rows", "raw_fusion_rows", 1);
+    medians.ratio("typed core / raw doubles, entropy of a gas", "typed_gas_rows", "raw_gas_rows",
+                  1);
+    medians.time("one text quantity read", "read_text", 0.1);
+    medians.time("one whole call, value | unit twice and a show", "whole_call", 0.1);
+    medians.ratio("row of a column call / core, ΔH / T (one division)", "column_call",
+                  "typed_fusion_rows", 1.5);
+    medians.ratio("row of a column call / core, entropy of a gas", "gas_column_call",
+                  "typed_gas_rows", 1.5);
 }

@@ -4,11 +4,13 @@
 #include "core/substances/heating.h"
 #include "core/substances/transition.h"
 #include "tests/core/expect_refusal.h"
+#include "tests/core/substances/quadrature.h"
 
 #include <gtest/gtest.h>
 
 #include <algorithm>
 #include <cmath>
+#include <tuple>
 
 namespace {
 
@@ -50,6 +52,29 @@ TEST(HeatingCurve, StepsToThePhaseAbove) {
                 1e-6);
     EXPECT_NEAR((curve[2].entropy - curve[1].entropy).value(), vaporization(water).entropy.value(),
                 1e-12);
+}
+
+TEST(HeatingCurve, AgreesWithQuadratureAtEveryPoint) {
+    for (auto [text, from, to] : {std::tuple{"Fe", 298.15, 2000.0},
+                                  {"SiO2", 250.0, 2500.0},
+                                  {"H2O", 250.0, 500.0},
+                                  {"NiO", 300.0, 1500.0}}) {
+        const Substance s = find_substance(text);
+        const auto curve = heating_curve(s, kelvin(from), kelvin(to), 9);
+        for (std::size_t i = 1; i < curve.size(); ++i) {
+            // At a transition the lower of the two points; the step itself stands in other tests.
+            if (curve[i].temperature == curve[i - 1].temperature) continue;
+            const double t = absolute(curve[i].temperature).value();
+            EXPECT_NEAR(
+                static_cast<double>(curve[i].entropy.value() / quadrature::heating(s, from, t, 1)),
+                1, 1e-12)
+                << text << ' ' << t;
+            EXPECT_NEAR(
+                static_cast<double>(curve[i].enthalpy.value() / quadrature::heating(s, from, t, 0)),
+                1, 1e-12)
+                << text << ' ' << t;
+        }
+    }
 }
 
 TEST(HeatingCurve, IsRefusedDownwards) {

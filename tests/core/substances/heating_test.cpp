@@ -5,9 +5,9 @@
 #include "tests/core/accuracy.h"
 #include "tests/core/expect_refusal.h"
 #include "tests/core/random_states.h"
+#include "tests/core/substances/quadrature.h"
 #include "tests/published/table.h"
 
-#include <boost/math/quadrature/gauss_kronrod.hpp>
 #include <gtest/gtest.h>
 #include <rapidcheck/gtest.h>
 
@@ -18,7 +18,7 @@ namespace {
 
 using namespace core;
 using namespace core::substances;
-using accuracy::Exact;
+using accuracy::Exact, quadrature::heating;
 
 Temperature kelvin(double value) { return Temperature::kelvin(value); }
 
@@ -87,26 +87,6 @@ TEST(Heating, MeetsEveryTransitionAtEquilibrium) {
     }
 }
 
-// Independent route: quadrature of cp/T and cp in 50 digits with 61 nodes, phase by phase.
-Exact quadrature(Substance const& s, double from, double to, int power) {
-    Exact sum = 0;
-    for (Rung const& r : s.rungs()) {
-        const double a = std::max(from, r.from), b = std::min(to, r.to);
-        if (r.from > from && r.from < to) sum += power == 1 ? r.entropy_jump : r.enthalpy_jump;
-        if (a >= b) continue;
-        Interval const& i = interval_of(r);
-        sum += boost::math::quadrature::gauss_kronrod<Exact, 61>::integrate(
-            [&](Exact const& t) -> Exact {
-                const Exact cp = i.gas_constant *
-                                 (i.a1 / (t * t) + i.a2 / t + i.root / sqrt(t) + i.a3 + i.a4 * t +
-                                  i.a5 * t * t + i.a6 * t * t * t + i.a7 * t * t * t * t);
-                return power == 1 ? Exact(cp / t) : cp;
-            },
-            Exact(a), Exact(b), 8, Exact("1e-25"));
-    }
-    return sum;
-}
-
 TEST(Heating, AgreesWithQuadrature) {
     for (auto [text, from, to] : {std::tuple{"Fe", 298.15, 2000.0},
                                   {"SiO2", 250.0, 1500.0},
@@ -119,7 +99,7 @@ TEST(Heating, AgreesWithQuadrature) {
                                   {"NiO", 300.0, 1500.0},
                                   {"Al", 500.0, 500.001}}) {
         const Substance s = find_substance(text);
-        const Exact entropy = quadrature(s, from, to, 1), heat = quadrature(s, from, to, 0);
+        const Exact entropy = heating(s, from, to, 1), heat = heating(s, from, to, 0);
         EXPECT_NEAR(
             static_cast<double>(entropy_of_heating(s, kelvin(from), kelvin(to)).value() / entropy),
             1, 1e-12)
