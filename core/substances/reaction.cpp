@@ -144,9 +144,9 @@ Temperature Reaction::to() const {
 
 MolarEntropy entropy_of_reaction(Reaction const& reaction, Temperature temperature,
                                  Notes const& notes) {
-    for (auto const& [substance, number] : reaction.participants)
+    for (Participant const& each : reaction.participants)
         notes.uncertainty(
-            [&] { return number * substance.entropy_uncertainty(temperature).value(); });
+            [&] { return each.number * each.substance.entropy_uncertainty(temperature).value(); });
     return sum(
         reaction, temperature, "S°", [&](Substance const& s) { return s.entropy(temperature); },
         notes);

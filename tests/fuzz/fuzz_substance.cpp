@@ -24,7 +24,7 @@ void require(bool condition) {
 }
 
 void check(Failure const& failure) {
-    require(!failure.given.empty() && !failure.needed.empty() && !failure.repair.empty());
+    require(!failure.needed.empty() && !failure.repair.empty());
 }
 
 /// A temperature between the ends of a range, from one byte.
