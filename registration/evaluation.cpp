@@ -25,12 +25,6 @@ bool is_amount(Dimension d) {
            d == core::dimension<core::MassFlow> || d == core::dimension<core::MolarFlow>;
 }
 
-/// Whether an argument is looked at as numbers; a substance is where its molar mass stands for it.
-bool is_numeric(Need const& need, Given const& given) {
-    if (need.kind == Need::Kind::named) return tells_molar_mass(given);
-    return need.kind == Need::Kind::quantity || need.kind == Need::Kind::any_quantity;
-}
-
 /// Whether figures of the tables stand behind an argument.
 bool is_of_tables(Need const& need) {
     return need.kind == Need::Kind::substance || need.kind == Need::Kind::gas ||

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: MPL-2.0
 #include "registration/molar_mass.h"
 
+#include "core/steam/state.h"
 #include "core/substances/formula.h"
 #include "core/substances/substance.h"
 #include "registration/gas_argument.h"
@@ -19,7 +20,8 @@ bool tells_molar_mass(Given const& given) {
 
 bool knows_molar_mass(Need::Kind kind) {
     return kind == Need::Kind::named || kind == Need::Kind::substance || kind == Need::Kind::gas ||
-           kind == Need::Kind::constant_gas;
+           kind == Need::Kind::constant_gas || kind == Need::Kind::steam ||
+           kind == Need::Kind::steam_word;
 }
 
 namespace {
@@ -44,6 +46,8 @@ double molar_mass_of(Need::Kind kind, Given const& given, std::size_t row) {
         return read_gas_argument(given, row, core::silent).molar_mass().value();
     if (kind == Need::Kind::constant_gas)
         return read_constant_gas(given, row, core::silent).gas.molar_mass().value();
+    if (kind == Need::Kind::steam || kind == Need::Kind::steam_word)
+        return core::steam::molar_mass.value();
     const std::string_view text = given.cell(row).text;
     if (kind == Need::Kind::substance)
         return core::substances::find_substance(text).molar_mass().value();

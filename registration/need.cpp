@@ -85,6 +85,18 @@ bool is_material_on(core::Dimension heat_capacity, Given const& given) {
     return true;
 }
 
+/// Whether any row is one.
+bool has_numbers(Given const& given) {
+    Numbers const* numbers = given.if_numbers();
+    return numbers && numbers->faults.size() + numbers->blanks.size() < numbers->count();
+}
+
+/// Words are told by their first letter; what is wrong with them is told by who reads them.
+bool is_coordinate_of_steam(Given const& given) {
+    if (has_numbers(given)) return is_coordinate(given.numbers());
+    return begins_with_letter(given);
+}
+
 bool is_table(Given const& given) {
     bool any = false;
     for (std::size_t row = 0; row < given.cell_count(); ++row) {
@@ -118,10 +130,16 @@ Failure wrong_kind(Need const& need, Given const& given, Numbers const& numbers)
         return unfit(given_text + " without a unit",
                      "write the unit the number is in, for example `" +
                          example_with_unit(given, need) + "`");
-    if (numbers.dimension == need.dimension) {
+    const bool steam = need.kind == Need::Kind::steam;
+    if (numbers.dimension == need.dimension || steam) {
         if (numbers.reading == Reading::gauge)
             return unfit(given_text + ", a gauge pressure",
                          "make it absolute with PRESSURE.ABSOLUTE(gauge; atmospheric)");
+        if (steam && numbers.reading == Reading::difference)
+            return unfit(given_text + ", a temperature difference",
+                         "write the temperature itself in K or °C");
+    }
+    if (numbers.dimension == need.dimension && !steam) {
         if (need.reading == Reading::gauge)
             return unfit(given_text + ", an absolute pressure",
                          "mark a gauge pressure with (g), for example `5 bar(g)`");
@@ -143,6 +161,12 @@ Failure wrong_kind(Need const& need, Given const& given, Numbers const& numbers)
 
 } // namespace
 
+bool is_numeric(Need const& need, Given const& given) {
+    if (need.kind == Need::Kind::named) return tells_molar_mass(given);
+    if (need.kind == Need::Kind::steam) return has_numbers(given);
+    return need.kind == Need::Kind::quantity || need.kind == Need::Kind::any_quantity;
+}
+
 bool stands_for_all_rows(Need const& need, Given const& given) {
     return given.cell_count() == 1 || (need.kind == Need::Kind::gas && means_mixture(given));
 }
@@ -160,6 +184,11 @@ bool accepts(Need const& need, Given const& given) {
     case Need::Kind::equation:
         return begins_with_letter(given) ||
                (need.kind == Need::Kind::equation && is_filled_text(given));
+    case Need::Kind::steam:
+        return is_coordinate_of_steam(given);
+    case Need::Kind::steam_word:
+        return given.cell_count() == 1 && given.cell(0).kind == Cell::Kind::text &&
+               given.cell(0).text == "steam";
     case Need::Kind::material:
         return is_material_on(need.dimension, given);
     case Need::Kind::gas:
@@ -181,7 +210,8 @@ bool accepts(Need const& need, Given const& given) {
 core::Failure misfit(Need const& need, Given const& given) {
     if (given.missing())
         return Failure(Failure::Kind::unfit, "nothing", described(need), "fill the argument in");
-    if (need.kind == Need::Kind::quantity || need.kind == Need::Kind::any_quantity) {
+    if (need.kind == Need::Kind::quantity || need.kind == Need::Kind::any_quantity ||
+        need.kind == Need::Kind::steam) {
         if (Numbers const* numbers = given.if_numbers()) return wrong_kind(need, given, *numbers);
         return given.why_not_numbers();
     }
@@ -215,6 +245,11 @@ std::string described(Need const& need) {
     case Need::Kind::gas:
         return "a gas such as `N2`, or a mixture such as `0.79 N2 + 0.21 O2` or a block of gases "
                "and fractions";
+    case Need::Kind::steam:
+        return "a temperature, an absolute pressure, a specific enthalpy, entropy or volume, a "
+               "dryness from 0 to 1, `saturated liquid` or `saturated vapour`";
+    case Need::Kind::steam_word:
+        return "the word `steam`";
     case Need::Kind::constant_gas:
         return "a gas with its heat capacity such as `air, cp = 1.005 kJ/(kg·K)`";
     case Need::Kind::equation:

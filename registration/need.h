@@ -20,11 +20,13 @@ struct Need {
         substance,    ///< a substance of the tables
         gas,          ///< a gas of the tables or a mixture of such
         constant_gas, ///< the same with a constant heat capacity of the dimension below, or of any
-        equation,     ///< a reaction equation
-        material,     ///< an own material of the basis below
-        cell,         ///< a cell as it stands
-        left_out,     ///< nothing, where other forms of the function take a value
-        table,        ///< a rectangle of plain numbers
+        steam, ///< a quantity that with another fixes a state of water, or its dryness in words
+        steam_word, ///< the word `steam`
+        equation,   ///< a reaction equation
+        material,   ///< an own material of the basis below
+        cell,       ///< a cell as it stands
+        left_out,   ///< nothing, where other forms of the function take a value
+        table,      ///< a rectangle of plain numbers
     };
 
     Kind kind = Kind::quantity;
@@ -41,6 +43,14 @@ struct Need {
                a.share == b.share;
     }
 };
+
+/// Whether an argument is looked at as numbers: a quantity; a substance told by its molar mass; a
+/// coordinate of steam that is not told in words.
+bool is_numeric(Need const&, Given const&);
+
+/// Whether numbers can be a coordinate of steam: a temperature, an absolute pressure, an enthalpy, entropy
+/// or volume per mass, a dryness.
+bool is_coordinate(Numbers const&);
 
 /// Whether an argument that is no column of numbers is one thing for all rows: one cell, or a
 /// mixture in a block.

@@ -80,7 +80,7 @@ std::vector<Input> stated_inputs(Evaluation const& evaluation) {
 }
 
 bool is_numeric(Input const& input) {
-    return input.need->kind == Need::Kind::quantity || input.need->kind == Need::Kind::any_quantity;
+    return input.need->kind != Need::Kind::named && is_numeric(*input.need, *input.given);
 }
 
 /// `18.7 kJ/mol = 18700 J/mol, u = 200 J/mol`

@@ -165,7 +165,9 @@ void collect_same_atoms(std::vector<Near>& near, std::string_view text) {
 void refuse_steam(std::string_view small) {
     if (small != "steam") return;
     refuse_unfit("steam", "a substance of the tables",
-                 "use ENTROPY.STEAM and its sisters for steam, or write `water` or `H2O(g)`");
+                 "use ENTROPY.STEAM, ENTHALPY.STEAM or ENTROPY.VAPORIZATION(\"steam\"; "
+                 "temperature) for steam by "
+                 "IAPWS, or write `water` or `H2O(g)` for the table");
 }
 
 // --- the search ------------------------------------------------------------------------------

@@ -12,6 +12,7 @@ std::span<const Section> sections() {
         {"Simple processes", simple_processes()},
         {"Variable heat capacity and tables", variable_heat_capacity()},
         {"Tables and curves", tables()},
+        {"Water and steam", steam()},
         {"Mixing", mixing()},
         {"Balances and the second law", balance()},
         {"End states", end_states()},

@@ -16,6 +16,7 @@ std::span<const Entry> heat();
 std::span<const Entry> simple_processes();
 std::span<const Entry> variable_heat_capacity();
 std::span<const Entry> tables();
+std::span<const Entry> steam();
 std::span<const Entry> mixing();
 std::span<const Entry> balance();
 std::span<const Entry> end_states();

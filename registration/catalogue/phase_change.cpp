@@ -2,8 +2,10 @@
 #include "registration/catalogue/catalogue.h"
 
 #include "core/processes/phase_change.h"
+#include "core/steam/state.h"
 #include "core/substances/transition.h"
 #include "registration/catalogue/shared_arguments.h"
+#include "registration/steam_arguments.h"
 #include "registration/substance_arguments.h"
 
 namespace registration::catalogue {
@@ -28,6 +30,11 @@ core::MolarEntropy vaporization_of(core::substances::Substance const& substance,
 core::MolarEntropy transition_of(core::substances::Substance const& substance,
                                  core::Temperature near, core::Notes const& notes) {
     return core::substances::transition_near(substance, near, notes).entropy;
+}
+
+core::SpecificEntropy vaporization_of_steam(SteamWord, core::Temperature temperature,
+                                            core::Notes const& notes) {
+    return core::steam::entropy_of_vaporization(temperature, notes);
 }
 
 constexpr const char* at_one_bar = "at 1 bar; ΔS is the difference of the entropies of both phases";
@@ -59,8 +66,8 @@ constexpr Entry entries[] = {
          .says = "Entropy of vaporization: enthalpy of vaporization over the boiling temperature.",
          .arguments = {{{.name = "what",
                          .symbol = "ΔH",
-                         .says = "enthalpy of vaporization, molar, specific or of the whole; or a "
-                                 "substance alone, at 1 bar",
+                         .says = "enthalpy of vaporization, molar, specific or of the whole; a "
+                                 "substance alone, at 1 bar; or `steam`",
                          .example = "40.65 kJ/mol"},
                         {.name = "temperature",
                          .symbol = "T",
@@ -68,9 +75,15 @@ constexpr Entry entries[] = {
                          .example = "99.97 °C"},
                         amount,
                         show}},
-         .forms = {equilibrium, form<vaporization_of>(
-                                    "ΔS = S(g) - S(l), at the boiling temperature of the tables",
-                                    report, at_one_bar)},
+         .forms = {equilibrium,
+                   form<vaporization_of_steam>(
+                       "Δs = s″ - s′, of water at the temperature",
+                       "International Association for the Properties of Water and Steam, "
+                       "R7-97(2012)",
+                       "273.15 K to 647.096 K"),
+                   form<vaporization_of>(
+                       "ΔS = S(g) - S(l), at the boiling temperature of the tables", report,
+                       at_one_bar)},
          .examples = {{{"ENTROPY.VAPORIZATION(\"40.651 kJ/mol\"; \"373.124 K\")",
                         108.947695672216}}}}),
     describe(

@@ -2,44 +2,16 @@
 #include "core/materials/heating_curve.h"
 #include "core/substances/heating_curve.h"
 #include "core/substances/transition.h"
-#include "core/text/quantity.h"
 #include "registration/catalogue/catalogue.h"
+#include "registration/catalogue/curve_columns.h"
 #include "registration/catalogue/shared_arguments.h"
 #include "registration/material_arguments.h"
 #include "registration/substance_arguments.h"
 
 #include <algorithm>
-#include <array>
 #include <cctype>
-#include <cmath>
 
-namespace registration {
-
-/// The headings that a curve's columns are asked for with; SI where there are none.
-struct CurveHeadings {
-    std::vector<std::string> texts;
-    std::vector<Unit> units;
-};
-template<>
-struct argument<CurveHeadings> : Unchecked {
-    static constexpr Need need{
-        .kind = Need::Kind::cell, .whole = true, .condition = "a row of headings"};
-    struct Rows {
-        Rows(Given const& given, int) : given_(&given) {}
-        CurveHeadings operator[](std::size_t) const {
-            CurveHeadings headings;
-            for (std::size_t at = 0; at < given_->cell_count(); ++at) {
-                const std::string_view text = given_->cell(at).text;
-                headings.texts.emplace_back(text);
-                headings.units.push_back(core::text::read_heading(text).unit);
-            }
-            return headings;
-        }
-        Given const* given_;
-    };
-};
-
-namespace catalogue {
+namespace registration::catalogue {
 namespace {
 
 using namespace core::substances;
@@ -126,85 +98,19 @@ Array substance_phases(Substance const& substance) {
     return table;
 }
 
-constexpr std::size_t curve_columns = 4;
-
-/// The columns of a heating curve: headings, units, and what turns an amount into a mass.
-class Columns {
-public:
-    /// `molar_mass` is 0 where none is known; `heat_capacity` says what the curve is counted per.
-    Columns(std::optional<CurveHeadings> headings, core::Dimension heat_capacity, double molar_mass)
-        : molar_mass_(molar_mass), dimensions_{core::Dimension::of_temperature, heat_capacity,
-                                               heat_capacity * core::Dimension::of_temperature,
-                                               heat_capacity} {
-        headings_ = headings ? std::move(*headings) : in_si();
-        if (headings_.texts.size() != curve_columns)
-            core::refuse_unfit(std::to_string(headings_.texts.size()) + " headings",
-                               "four headings: T, cp, enthalpy, entropy",
-                               "select four heading cells");
-        for (std::string const& text : headings_.texts) curve_.add(text);
-    }
-
-    void add(std::initializer_list<double> values) {
-        std::size_t column = 0;
-        for (const double value : values) {
-            curve_.add(in_column(column, value));
-            ++column;
-        }
-    }
-    Array made() { return std::move(curve_); }
-
-private:
-    CurveHeadings in_si() const {
-        const std::string capacity = core::text::si_unit(dimensions_[1]);
-        const std::string energy = core::text::si_unit(dimensions_[2]);
-        const auto bracketed = [](std::string const& unit) {
-            return unit.find_first_of("/·") == std::string::npos ? unit : "(" + unit + ")";
-        };
-        CurveHeadings headings{{"T / K", "cp / " + bracketed(capacity), "ΔH / " + bracketed(energy),
-                                "ΔS / " + bracketed(capacity)},
-                               {}};
-        for (std::string const& text : headings.texts)
-            headings.units.push_back(core::text::read_heading(text).unit);
-        return headings;
-    }
-
-    /// A value in the unit asked for, on the other basis by the molar mass.
-    double in_column(std::size_t column, double si) const {
-        constexpr core::Dimension molar_mass = core::dimension<core::MolarMass>;
-        const Unit& unit = headings_.units[column];
-        if (unit.dimension == dimensions_[column]) return unit.from_si(si);
-        if (column > 0 && molar_mass_ > 0 && unit.dimension * molar_mass == dimensions_[column])
-            return unit.from_si(si / molar_mass_);
-        if (column > 0 && molar_mass_ > 0 && unit.dimension == dimensions_[column] * molar_mass)
-            return unit.from_si(si * molar_mass_);
-        constexpr const char* needed[curve_columns] = {"a temperature", "a heat capacity",
-                                                       "an enthalpy", "an entropy"};
-        core::refuse_unfit("the heading of column " + std::to_string(column + 1) + ", `" +
-                               headings_.texts[column] + "`",
-                           std::string(needed[column]) + ", for example in " +
-                               core::text::si_unit(dimensions_[column]),
-                           "give four headings: T, cp, enthalpy, entropy");
-    }
-
-    double molar_mass_;
-    std::array<core::Dimension, curve_columns> dimensions_;
-    CurveHeadings headings_;
-    Array curve_{curve_columns};
-};
-
-std::size_t whole_number_of(double points) {
-    if (!(points >= 2 && points <= 10'000 && points == std::floor(points)))
-        core::refuse_impossible(
-            core::text::write_number(static_cast<long double>(points), 6) + " points",
-            "a whole number of points from 2 to 10000", "choose as many points as the chart needs");
-    return static_cast<std::size_t>(points);
+/// The columns of a heating curve, by what the heat capacity is counted per.
+std::vector<CurveColumn> heating_columns(core::Dimension heat_capacity) {
+    return {{"T", core::Dimension::of_temperature, "a temperature"},
+            {"cp", heat_capacity, "a heat capacity"},
+            {"ΔH", heat_capacity * core::Dimension::of_temperature, "an enthalpy"},
+            {"ΔS", heat_capacity, "an entropy"}};
 }
 
 Array curve_heating(Substance const& substance, Temperature from, Temperature to, double points,
                     std::optional<CurveHeadings> headings) {
-    const std::size_t count = whole_number_of(points);
-    Columns columns(std::move(headings), core::dimension<core::MolarHeatCapacity>,
-                    substance.molar_mass().value());
+    const std::size_t count = number_of_points(points);
+    CurveColumns columns(heating_columns(core::dimension<core::MolarHeatCapacity>),
+                         std::move(headings), substance.molar_mass().value());
     for (CurvePoint const& point : heating_curve(substance, from, to, count))
         columns.add({absolute(point.temperature).value(), point.heat_capacity.value(),
                      point.enthalpy.value(), point.entropy.value()});
@@ -225,10 +131,10 @@ core::Dimension heat_capacity_on(core::materials::Basis basis) {
 
 Array own_curve_heating(AnyOwnMaterial const& own, Temperature from, Temperature to, double points,
                         std::optional<CurveHeadings> headings) {
-    const std::size_t count = whole_number_of(points);
+    const std::size_t count = number_of_points(points);
     const auto molar_mass = own.material->molar_mass();
-    Columns columns(std::move(headings), heat_capacity_on(own.material->basis()),
-                    molar_mass ? molar_mass->value() : 0);
+    CurveColumns columns(heating_columns(heat_capacity_on(own.material->basis())),
+                         std::move(headings), molar_mass ? molar_mass->value() : 0);
     for (auto const& point : core::materials::heating_curve(*own.material, from, to, count))
         columns.add({point.temperature, point.heat_capacity, point.enthalpy, point.entropy});
     return columns.made();
@@ -276,5 +182,4 @@ constexpr Entry entries[] = {
 
 std::span<const Entry> tables() { return entries; }
 
-} // namespace catalogue
-} // namespace registration
+} // namespace registration::catalogue
