@@ -246,8 +246,8 @@ std::string described(Need const& need) {
         return "a gas such as `N2`, or a mixture such as `0.79 N2 + 0.21 O2` or a block of gases "
                "and fractions";
     case Need::Kind::steam:
-        return "a temperature, an absolute pressure, a specific enthalpy, entropy or volume, a "
-               "dryness from 0 to 1, `saturated liquid` or `saturated vapour`";
+        return "a temperature, an absolute pressure, a specific enthalpy, entropy or volume, or a "
+               "dryness";
     case Need::Kind::steam_word:
         return "the word `steam`";
     case Need::Kind::constant_gas:

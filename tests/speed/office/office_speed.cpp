@@ -119,6 +119,17 @@ Any texts(sal_Int32 row, sal_Int32 column) {
                            : text(std::to_string(300 + row % 700) + " K"));
 }
 
+/// Pressures and temperatures of superheated steam.
+Any steam(sal_Int32 row, sal_Int32 column) {
+    if (row == 0) return Any(column == 0 ? OUString("bar") : OUString("K"));
+    return Any(column == 0 ? 1 + row % 50 : 600 + 0.002 * row);
+}
+Any steam_texts(sal_Int32 row, sal_Int32 column) {
+    if (row == 0) return Any(OUString("text"));
+    return Any(column == 0 ? text(std::to_string(1 + row % 50) + " bar")
+                           : text(std::to_string(600 + row % 200) + " K"));
+}
+
 double median(std::vector<double> values) {
     std::ranges::sort(values);
     return values[values.size() / 2];
@@ -167,8 +178,11 @@ void compare(Reference<frame::XComponentLoader> const& office) {
     Case two_columns(office, "one ENTROPY.FUSION of two columns", headed, fusion + two, true);
     Case empty_one(office, "one empty add-in function of one column", headed, nothing + one, true);
     Case one_column(office, "one ENTROPY.FUSION of one column", headed, fusion + one, true);
-    Case* const all[] = {&built_in,  &built_in_array, &empty,     &add_in,
-                         &empty_two, &two_columns,    &empty_one, &one_column};
+    const std::string entropy = "=ENTROPYCELLS.FUNCTIONS.ENTROPYSTEAM";
+    Case steam_cells(office, "100,000 ENTROPY.STEAM, two texts", steam_texts, entropy + cells);
+    Case steam_column(office, "one ENTROPY.STEAM of two columns", steam, entropy + two, true);
+    Case* const all[] = {&built_in,    &built_in_array, &empty,      &add_in,      &empty_two,
+                         &two_columns, &empty_one,      &one_column, &steam_cells, &steam_column};
     for (int round = 0; round < rounds; ++round)
         for (Case* measured : all) measured->measure();
     for (Case* measured : all) measured->print();
@@ -184,6 +198,8 @@ void compare(Reference<frame::XComponentLoader> const& office) {
                 "");
     print_ratio("one call of one column / an empty one", one_column, empty_one, "");
     print_ratio("one call of two columns / an empty one", two_columns, empty_two, "");
+    print_ratio("one ENTROPY.STEAM of two columns / 100,000 cells", steam_column, steam_cells, "");
+    print_ratio("    a cell of steam / an empty add-in function", steam_cells, empty, "");
 }
 
 } // namespace
