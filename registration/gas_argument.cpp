@@ -263,6 +263,12 @@ Gas read_gas_argument(Given const& given, std::size_t row, core::Notes const& no
     return mixture.made();
 }
 
+core::real_gas::Fluid read_fluid_argument(Given const& given, std::size_t row,
+                                          core::Notes const& notes) {
+    if (means_mixture(given)) return core::real_gas::Fluid(read_gas_argument(given, row, notes));
+    return core::real_gas::read_fluid(given.cell(row).text, notes);
+}
+
 bool means_constant_gas(std::string_view text) { return split(text).has_value(); }
 
 ConstantGas read_constant_gas(Given const& given, std::size_t row, core::Notes const& notes) {

@@ -14,6 +14,7 @@
 
 #include "core/notes.h"
 #include "core/quantities.h"
+#include "core/real_gas/fluid.h"
 #include "core/substances/gas.h"
 #include "registration/given.h"
 
@@ -28,6 +29,9 @@ bool means_mixture(Given const&);
 /// The gas of a row. Throws Failure: what cannot be read, fractions that do not sum to 1 within
 /// 1e-6, `rest` among amounts or twice (unfit), amounts below zero (impossible).
 core::substances::Gas read_gas_argument(Given const&, std::size_t row, core::Notes const& notes);
+
+/// The same with critical constants; fluids that have these alone are read from text.
+core::real_gas::Fluid read_fluid_argument(Given const&, std::size_t row, core::Notes const& notes);
 
 /// A gas or mixture for its molar mass, with a heat capacity that does not change.
 struct ConstantGas {

@@ -20,8 +20,8 @@ bool tells_molar_mass(Given const& given) {
 
 bool knows_molar_mass(Need::Kind kind) {
     return kind == Need::Kind::named || kind == Need::Kind::substance || kind == Need::Kind::gas ||
-           kind == Need::Kind::constant_gas || kind == Need::Kind::steam ||
-           kind == Need::Kind::steam_word;
+           kind == Need::Kind::fluid || kind == Need::Kind::constant_gas ||
+           kind == Need::Kind::steam || kind == Need::Kind::steam_word;
 }
 
 namespace {
@@ -44,6 +44,8 @@ double of_named(std::string_view text) {
 double molar_mass_of(Need::Kind kind, Given const& given, std::size_t row) {
     if (kind == Need::Kind::gas)
         return read_gas_argument(given, row, core::silent).molar_mass().value();
+    if (kind == Need::Kind::fluid)
+        return read_fluid_argument(given, row, core::silent).molar_mass().value();
     if (kind == Need::Kind::constant_gas)
         return read_constant_gas(given, row, core::silent).gas.molar_mass().value();
     if (kind == Need::Kind::steam || kind == Need::Kind::steam_word)

@@ -168,7 +168,9 @@ bool is_numeric(Need const& need, Given const& given) {
 }
 
 bool stands_for_all_rows(Need const& need, Given const& given) {
-    return given.cell_count() == 1 || (need.kind == Need::Kind::gas && means_mixture(given));
+    return given.cell_count() == 1 ||
+           ((need.kind == Need::Kind::gas || need.kind == Need::Kind::fluid) &&
+            means_mixture(given));
 }
 
 bool accepts(Need const& need, Given const& given) {
@@ -192,6 +194,7 @@ bool accepts(Need const& need, Given const& given) {
     case Need::Kind::material:
         return is_material_on(need.dimension, given);
     case Need::Kind::gas:
+    case Need::Kind::fluid:
         return (begins_with_letter(given) || is_mixture(given)) && !states_heat_capacity(given);
     case Need::Kind::constant_gas:
         return is_constant_gas(need.dimension, given);
@@ -243,6 +246,7 @@ std::string described(Need const& need) {
     case Need::Kind::material:
         return "an own material: a block under headings, or the text of MATERIAL.OF";
     case Need::Kind::gas:
+    case Need::Kind::fluid:
         return "a gas such as `N2`, or a mixture such as `0.79 N2 + 0.21 O2` or a block of gases "
                "and fractions";
     case Need::Kind::steam:

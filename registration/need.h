@@ -19,6 +19,7 @@ struct Need {
         named,        ///< a substance only for its molar mass, which may stand in its place
         substance,    ///< a substance of the tables
         gas,          ///< a gas of the tables or a mixture of such
+        fluid,        ///< the same with critical constants
         constant_gas, ///< the same with a constant heat capacity of the dimension below, or of any
         steam, ///< a quantity that with another fixes a state of water, or its dryness in words
         steam_word, ///< the word `steam`

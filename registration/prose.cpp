@@ -146,7 +146,7 @@ std::string steps(Evaluation const& evaluation, Results const& results, Results 
         if (input.need->kind == Need::Kind::material)
             text += std::string(input.argument->name) + ": " +
                     read_own_material(*input.given, core::silent)->written() + "\n";
-        else if (input.need->kind == Need::Kind::gas && means_mixture(*input.given))
+        else if (stands_for_all_rows(*input.need, *input.given) && means_mixture(*input.given))
             text += std::string(input.argument->name) + ": " +
                     read_gas_argument(*input.given, 0, core::silent).written() + "\n";
         else if (input.need->whole)

@@ -4,6 +4,7 @@
 // Arguments that name substances: read from text, once a column where one text stands for all rows.
 
 #include "core/notes.h"
+#include "core/real_gas/fluid.h"
 #include "core/substances/gas.h"
 #include "core/substances/reaction.h"
 #include "core/substances/substance.h"
@@ -59,6 +60,9 @@ template<>
 struct argument<core::substances::Gas>
     : read_argument<core::substances::Gas, read_gas_argument, Need::Kind::gas> {};
 template<>
+struct argument<core::real_gas::Fluid>
+    : read_argument<core::real_gas::Fluid, read_fluid_argument, Need::Kind::fluid> {};
+template<>
 struct argument<core::substances::Reaction>
     : read_argument<core::substances::Reaction, reaction_in, Need::Kind::equation> {};
 template<>
@@ -79,6 +83,16 @@ struct argument<ConstantGasOn<Basis>> : Unchecked {
         }
     };
 };
+
+/// A molar result on the basis the heat capacity is stated on.
+template<class Basis, class MolarQuantity>
+core::On<core::Times<MolarQuantity, core::AmountOfSubstance>, Basis>
+on_basis(ConstantGasOn<Basis> const& gas, MolarQuantity molar) {
+    if constexpr (std::is_same_v<Basis, core::Molar>)
+        return molar;
+    else
+        return molar / gas.gas.molar_mass();
+}
 
 /// The heat capacity for the relations, told where somebody reads along.
 inline core::Positive<core::MolarHeatCapacity> molar_heat_capacity(ConstantGas const& gas,

@@ -42,6 +42,7 @@ std::vector<Place> uncertain_places(Need const& need, Given const& given) {
     case Need::Kind::material:
         return uncertain_places(read_description(given));
     case Need::Kind::gas:
+    case Need::Kind::fluid:
     case Need::Kind::constant_gas:
         return uncertain_places_of_gas(given);
     case Need::Kind::text:

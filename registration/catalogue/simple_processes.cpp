@@ -27,14 +27,6 @@ core::MolarEntropy isothermal_between_pressures(core::Positive<Pressure> from,
 }
 
 // A gas named with its heat capacity: the relation for a molar one, on the basis it is stated on.
-template<class Basis, class MolarQuantity>
-core::On<core::Times<MolarQuantity, core::AmountOfSubstance>, Basis>
-on_basis(ConstantGasOn<Basis> const& gas, MolarQuantity molar) {
-    if constexpr (std::is_same_v<Basis, Molar>)
-        return molar;
-    else
-        return molar / gas.gas.molar_mass();
-}
 template<class Basis>
 core::On<core::Entropy, Basis> entropy_of_constant_gas(ConstantGasOn<Basis> const& gas,
                                                        Temperature t1, core::Positive<Pressure> p1,

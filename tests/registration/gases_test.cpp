@@ -177,4 +177,54 @@ TEST(PublishedUncertainties, CombineWithThoseOfInputs) {
     EXPECT_NEAR(u, std::hypot(0.05, cp / 298.15 * 2), 1e-4);
 }
 
+TEST(RealGases, TakeTextsBlocksAndAWordForTheEquation) {
+    const Range block = Range::table({{"gas", "mol%"}, {"CH4", 90.0}, {"C2H6", "rest"}});
+    const auto departure = [](Range gas, Range equation) {
+        return number(call("ENTROPY.DEPARTURE", {gas, "300 K", "60 bar", equation}));
+    };
+    EXPECT_NEAR(departure(block, Range()), departure("0.9 CH4 + 0.1 C2H6", "peng-robinson"), 1e-12);
+    EXPECT_NE(departure(block, "Soave"), departure(block, Range()));
+    EXPECT_LT(departure("R134a", Range()), 0);
+    const auto reason = [](std::vector<Range> arguments) {
+        arguments.resize(4);
+        arguments.push_back("why");
+        return text(call("ENTROPY.DEPARTURE", arguments));
+    };
+    EXPECT_NE(reason({"CO2", "300 K", "60 bar", "ideal"}).find("virial"), std::string::npos);
+    EXPECT_NE(reason({"CO2", "300 K", "5 bar(g)"}).find("PRESSURE.ABSOLUTE"), std::string::npos);
+    EXPECT_NE(reason({"Fe(g)", "3000 K", "1 bar"}).find("critical constants"), std::string::npos);
+    EXPECT_NE(reason({"NH3", "400 K", "10 bar"}).find("polar"), std::string::npos);
+    const double u = number(call("ENTROPY.REALGAS", {"CO2", "300 K", "1 bar", "350 K ± 1 K",
+                                                     "60 bar", "2 kg", Range(), "uncertainty"}));
+    EXPECT_GT(u, 0);
+    EXPECT_NEAR(
+        number(call("ENTROPY.REALGAS", {"CO2", "300 K", "1 bar", "350 K", "60 bar", "1 kg"})),
+        number(call("ENTROPY.REALGAS", {"CO2", "300 K", "1 bar", "350 K", "60 bar"})) / 0.044009,
+        1e-6);
+}
+
+TEST(Streams, HaveExergyInEveryForm) {
+    const auto exergy = [](Range what, Range t, Range p, Range t0, Range p0) {
+        return number(call("EXERGY.STREAM", {what, t, p, t0, p0}));
+    };
+    const double thermal = 500 - 290 - 290 * std::log(500.0 / 290);
+    EXPECT_NEAR(exergy("4.18 kJ/(kg·K)", "500 K", Range(), "290 K", Range()), 4180 * thermal, 1e-6);
+    EXPECT_NEAR(exergy("4 kW/K", "500 K", Range(), "290 K", Range()), 4000 * thermal, 1e-6);
+    EXPECT_NEAR(exergy("air, cp = 1 kJ/(kg·K)", "500 K", "1 bar", "290 K", "1 bar"), 1000 * thermal,
+                1e-6);
+    const double air = exergy("air", "500 K", "7 bar", "290 K", "1 bar");
+    EXPECT_NEAR(air,
+                number(call("ENTHALPY.GAS", {"air", "290 K", "1 bar", "500 K", "7 bar"})) -
+                    290 * number(call("ENTROPY.GAS", {"air", "290 K", "1 bar", "500 K", "7 bar"})),
+                1e-9);
+    EXPECT_GT(exergy("Al", "1000 K", Range(), "290 K", Range()), 0);
+    const Range steel =
+        Range::table({{"T / K", "cp / (J/(kg·K))"}, {250.0, 450.0}, {900.0, 450.0}});
+    EXPECT_NEAR(exergy(steel, "500 K", Range(), "290 K", Range()), 450 * thermal, 1e-6);
+    EXPECT_EQ(text(call("EXERGY.STREAM", {"4 kW/K", "500 K", "2 bar", "290 K", "1 bar"})),
+              "#VALUE!");
+    EXPECT_EQ(text(call("EXERGY.STREAM", {"air, cp = 1 kJ/(kg·K)", "500 K", Range(), "290 K"})),
+              "#VALUE!");
+}
+
 } // namespace
