@@ -183,9 +183,9 @@ bool accepts(Need const& need, Given const& given) {
     case Need::Kind::text:
         return is_filled_text(given);
     case Need::Kind::substance:
+        return begins_with_letter(given) && !means_mixture(given);
     case Need::Kind::equation:
-        return begins_with_letter(given) ||
-               (need.kind == Need::Kind::equation && is_filled_text(given));
+        return is_filled_text(given);
     case Need::Kind::steam:
         return is_coordinate_of_steam(given);
     case Need::Kind::steam_word:

@@ -66,6 +66,13 @@ TEST(GasBlocks, StandForAllRowsAndTellTheirMolarMass) {
         2 * expected / molar_mass, 1e-9);
 }
 
+TEST(GasBlocks, HaveAbsoluteEntropies) {
+    EXPECT_NEAR(
+        number(call("ENTROPY.STANDARD",
+                    {Range::table({{"gas", "mol%"}, {"N2", 79.0}, {"O2", "rest"}}), "300 K"})),
+        number(call("ENTROPY.STANDARD", {as_text, "300 K"})), 1e-12);
+}
+
 TEST(GasBlocks, AreRefusedWithTheirReason) {
     expect_why(Range::table({{"N2", 0.79}, {"O2", 0.2}}), "sum to 1");
     expect_why(Range::table({{"N2", "rest"}, {"O2", "rest"}}), "`rest` twice");
