@@ -1,18 +1,23 @@
 // SPDX-License-Identifier: MPL-2.0
 #include "registration/call.h"
+#include "registration/catalogue/catalogue.h"
 #include "tests/registration/formula_call.h"
 
 #include <gtest/gtest.h>
 
 #include <array>
 #include <cmath>
+#include <cstdio>
+#include <regex>
+#include <string>
+#include <vector>
 
 // Combined standard uncertainty, JCGM 100:2008.
 
 namespace {
 
 using namespace registration;
-using tests::number, tests::Range, tests::text;
+using tests::call_formula, tests::number, tests::Range, tests::text;
 
 /// JCGM 100:2008, H.1: length of an end gauge at 20 °C compared with a standard,
 /// l = ls + d - ls · (δα · θ + αs · δθ), equation (H.3).
@@ -128,6 +133,97 @@ TEST(Uncertainty, IsBoundedInItsWork) {
     EXPECT_NEAR(number(tests::call("ENTROPY.GENERATED",
                                    {Range::table(rows), Range(), Range(), "uncertainty"})),
                 0.1 * std::sqrt(1000.0), 1e-9);
+}
+
+/// A formula in which one quantity in quotes can be written otherwise.
+struct Quoted {
+    std::size_t at, length; ///< of the number inside the formula
+    double value;
+    std::string unit;
+};
+
+/// Every `"300 K"` of a formula, but not what stands inside braces.
+std::vector<Quoted> quantities_of(std::string const& formula) {
+    static const std::regex quantity("\"([0-9.]+) ([^\"]+)\"");
+    std::vector<Quoted> found;
+    for (auto it = std::sregex_iterator(formula.begin(), formula.end(), quantity);
+         it != std::sregex_iterator(); ++it) {
+        const auto at = static_cast<std::size_t>(it->position(1));
+        const auto open = formula.rfind('{', at), close = formula.rfind('}', at);
+        if (open != std::string::npos && (close == std::string::npos || close < open)) continue;
+        const std::string unit = (*it)[2];
+        if (unit.find('+') == std::string::npos && unit.find("->") == std::string::npos)
+            found.push_back(
+                {at, static_cast<std::size_t>(it->length(1)), std::stod((*it)[1]), unit});
+    }
+    return found;
+}
+
+std::string with_number(std::string formula, Quoted const& q, double value) {
+    char text[40];
+    std::snprintf(text, sizeof text, "%.15g", value);
+    return formula.replace(q.at, q.length, text);
+}
+
+/// The same with u = 1e-4 of its number behind each quantity, and `show` asking for the uncertainty.
+std::string with_uncertainties(std::string formula, std::vector<Quoted> const& all,
+                               registration::Entry const& entry) {
+    for (auto q = all.rbegin(); q != all.rend(); ++q) {
+        char text[60];
+        const std::string unit = q->unit == "°C" ? "K" : q->unit;
+        std::snprintf(text, sizeof text, " ± %.15g %s", q->value * 1e-4, unit.c_str());
+        formula.insert(q->at + q->length + 1 + q->unit.size(), text);
+    }
+    const std::size_t shows = entry.argument_count();
+    std::size_t arguments = 1, depth = 0;
+    bool quoted = false;
+    for (const char c : formula) {
+        quoted = quoted != (c == '"');
+        depth += !quoted && c == '{';
+        depth -= !quoted && c == '}';
+        arguments += !quoted && depth == 0 && c == ';';
+    }
+    std::string show = "\"uncertainty\"";
+    if (arguments == shows) { // a unit stands there already
+        const std::size_t last = formula.rfind("; \"");
+        show = "\"uncertainty in " + formula.substr(last + 3, formula.rfind('"') - last - 3) + '"';
+        return formula.substr(0, last + 2) + show + ")";
+    }
+    formula.pop_back();
+    for (; arguments < shows; ++arguments) formula += ";";
+    return formula + show + ")";
+}
+
+// Every documented example that gives a number, iterated ones too: each quantity is given u = 1e-4 of
+// itself, and the combined uncertainty is compared with the differences of two calls a quantity.
+TEST(Uncertainty, GoesThroughEveryFunctionOfTheCatalogue) {
+    std::size_t checked = 0;
+    for (auto const& section : registration::catalogue::sections())
+        for (registration::Entry const& entry : section.entries)
+            for (auto const& example : entry.examples) {
+                if (!example.formula || example.text ||
+                    entry.position(registration::Argument::Role::show) == entry.argument_count())
+                    continue;
+                const std::string formula = example.formula;
+                const auto all = quantities_of(formula);
+                if (all.empty() || formula.starts_with("MOLAR") || formula.starts_with("QUANTITY"))
+                    continue;
+                // What published data leave of themselves, without a word in the formula.
+                const double of_data = number(call_formula(with_uncertainties(formula, {}, entry)));
+                double variance = of_data * of_data;
+                for (Quoted const& q : all) {
+                    const double step = q.value * 1e-4;
+                    const double up = number(call_formula(with_number(formula, q, q.value + step))),
+                                 down =
+                                     number(call_formula(with_number(formula, q, q.value - step)));
+                    variance += (up - down) * (up - down) / 4;
+                }
+                const std::string asked = with_uncertainties(formula, all, entry);
+                const double u = number(call_formula(asked));
+                EXPECT_NEAR(u, std::sqrt(variance), 1e-6 * std::sqrt(variance) + 1e-12) << asked;
+                ++checked;
+            }
+    EXPECT_GE(checked, 40u);
 }
 
 } // namespace
