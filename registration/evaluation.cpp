@@ -17,8 +17,11 @@ using core::Failure;
 constexpr std::size_t most_uncertain_inputs = 1000;
 constexpr Dimension molar_mass_dimension = core::dimension<core::MolarMass>;
 
-/// Energy or entropy as such, not per mole and not per kilogram.
-bool is_extensive(Dimension d) { return d.mass == 1 && d.amount == 0; }
+/// Energy, entropy or volume as such, not per mole and not per kilogram.
+bool is_extensive(Dimension d) {
+    return (d.mass == 1 && d.amount == 0) || d == core::dimension<core::Volume> ||
+           d == core::dimension<core::VolumeFlow>;
+}
 
 bool is_amount(Dimension d) {
     return d == core::dimension<core::Mass> || d == core::dimension<core::AmountOfSubstance> ||
@@ -169,11 +172,18 @@ void Evaluation::measure() {
         if (given.missing() || need.whole) continue;
         measure(given, count_of(need, given), across_of(need, given), static_cast<int>(i));
     }
-    if (!arguments_.amount.missing()) {
-        Numbers const& amount = arguments_.amount.numbers();
-        measure(arguments_.amount, amount.count(), amount.across,
-                static_cast<int>(arguments_.inputs.size()));
+    if (!arguments_.amount.missing()) measure_amount();
+}
+
+void Evaluation::measure_amount() {
+    Given const& given = arguments_.amount;
+    const int position = static_cast<int>(arguments_.inputs.size());
+    if (!given.if_numbers()) {
+        Failure failure = given.why_not_numbers();
+        failure.argument = position;
+        throw failure;
     }
+    measure(given, given.numbers().count(), given.numbers().across, position);
 }
 
 std::vector<Evaluation::Listed> Evaluation::listed_columns() const {
@@ -263,12 +273,13 @@ MolarMasses Evaluation::molar_masses() const {
 
 void Evaluation::weigh_amount() {
     Given const& given = arguments_.amount;
+    const int position = static_cast<int>(arguments_.inputs.size());
     Numbers const& amount = given.numbers();
     const auto refuse = [&](std::string needed, std::string repair) {
         Failure failure(Failure::Kind::unfit,
                         written(given.block(), 0) + (amount.bare ? " without a unit" : ""),
                         std::move(needed), std::move(repair));
-        failure.argument = static_cast<int>(arguments_.inputs.size());
+        failure.argument = position;
         throw failure;
     };
     if (!is_amount(amount.dimension) || amount.reading != Reading::plain)

@@ -83,6 +83,7 @@ private:
     void mark_text(Listed const&, std::size_t row);
     void spoil(std::size_t row, core::Failure, int position);
     void measure();
+    void measure_amount();
     void measure(Given const&, std::size_t count, bool across, int position);
     void mark_rows();
     void weigh_amount();

@@ -20,7 +20,9 @@ constexpr double fractions_tolerance = 1e-6;
 
 bool is_text(Cell const& cell) { return cell.kind == Cell::Kind::text; }
 
-bool is_rest(Cell const& cell) { return is_text(cell) && cell.text == "rest"; }
+bool is_rest(Cell const& cell) {
+    return is_text(cell) && (cell.text == "rest" || cell.text == "Rest"); // AutoCorrect
+}
 
 /// `21 mol%`, `(21 ± 1) mol%`; neither a substance nor a unit begins so.
 bool begins_with_number(std::string_view text) {
@@ -223,9 +225,10 @@ private:
             core::refuse_impossible("a sum of " + core::written(sum), "a mixture of something",
                                     "check the amounts");
         if (is_fractions() && !has_rest_ && !moved_ && std::abs(sum - 1) > fractions_tolerance)
-            core::refuse_unfit("a sum of " + core::written(sum),
-                               "fractions that sum to 1 within 1e-6",
-                               "check the fractions, or write `rest` for one of them");
+            core::refuse_unfit(
+                "a sum of " + core::written(sum), "fractions that sum to 1 within 1e-6",
+                "check the fractions; percentages need a heading such as `mol%`, and one "
+                "fraction may be the word `rest`");
     }
 
     Sheet sheet_;
@@ -235,20 +238,23 @@ private:
     std::vector<Part> parts_;
 };
 
-/// The two sides of `air, cp = 1.005 kJ/(kg·K)`.
+std::string_view trimmed(std::string_view text) {
+    while (text.starts_with(' ')) text.remove_prefix(1);
+    while (text.ends_with(' ')) text.remove_suffix(1);
+    return text;
+}
+
+/// The parts of `air, cp = 1.005 kJ/(kg·K)`.
 struct Split {
-    std::string_view gas, heat_capacity;
+    std::string_view gas, symbol, heat_capacity;
 };
 std::optional<Split> split(std::string_view text) {
     const std::size_t equals = text.find('=');
     if (equals == std::string_view::npos) return std::nullopt;
     const std::size_t comma = text.substr(0, equals).rfind(',');
     if (comma == std::string_view::npos) return std::nullopt;
-    std::string_view word = text.substr(comma + 1, equals - comma - 1);
-    while (word.starts_with(' ')) word.remove_prefix(1);
-    while (word.ends_with(' ')) word.remove_suffix(1);
-    if (word != "cp") return std::nullopt;
-    return Split{text.substr(0, comma), text.substr(equals + 1)};
+    return Split{text.substr(0, comma), trimmed(text.substr(comma + 1, equals - comma - 1)),
+                 trimmed(text.substr(equals + 1))};
 }
 
 } // namespace
@@ -266,7 +272,7 @@ Gas read_gas_argument(Given const& given, std::size_t row, core::Notes const& no
 core::real_gas::Fluid read_fluid_argument(Given const& given, std::size_t row,
                                           core::Notes const& notes) {
     if (means_mixture(given)) return core::real_gas::Fluid(read_gas_argument(given, row, notes));
-    return core::real_gas::read_fluid(given.cell(row).text, notes);
+    return core::real_gas::read_fluid(given.cell(row).text);
 }
 
 bool means_constant_gas(std::string_view text) { return split(text).has_value(); }
@@ -274,8 +280,8 @@ bool means_constant_gas(std::string_view text) { return split(text).has_value();
 ConstantGas read_constant_gas(Given const& given, std::size_t row, core::Notes const& notes) {
     const std::string_view text = given.cell(row).text;
     const auto parts = split(text);
-    if (!parts)
-        core::refuse_unfit(std::string(text), "a gas with its heat capacity",
+    if (!parts || parts->symbol != "cp")
+        core::refuse_unfit(std::string(text), "a gas with its heat capacity at constant pressure",
                            "write it as `air, cp = 1.005 kJ/(kg·K)`");
     const Gas gas = core::substances::read_gas(parts->gas, notes);
     auto read = core::text::read_quantity(parts->heat_capacity);

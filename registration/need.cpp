@@ -135,6 +135,8 @@ Failure wrong_kind(Need const& need, Given const& given, Numbers const& numbers)
         if (numbers.reading == Reading::gauge)
             return unfit(given_text + ", a gauge pressure",
                          "make it absolute with PRESSURE.ABSOLUTE(gauge; atmospheric)");
+        if (steam && numbers.share != Share::none)
+            return unfit(given_text, "write the dryness as a number from 0 to 1, or in %");
         if (steam && numbers.reading == Reading::difference)
             return unfit(given_text + ", a temperature difference",
                          "write the temperature itself in K or °C");
@@ -190,7 +192,7 @@ bool accepts(Need const& need, Given const& given) {
         return is_coordinate_of_steam(given);
     case Need::Kind::steam_word:
         return given.cell_count() == 1 && given.cell(0).kind == Cell::Kind::text &&
-               given.cell(0).text == "steam";
+               (given.cell(0).text == "steam" || given.cell(0).text == "Steam");
     case Need::Kind::material:
         return is_material_on(need.dimension, given);
     case Need::Kind::gas:

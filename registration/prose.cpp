@@ -115,9 +115,10 @@ void list_whole(std::string& text, Input const& input) {
     text += '\n';
 }
 
-/// `ΔS` of `ΔS = ΔH / T`.
+/// `ΔS` of `ΔS = ΔH / T`; a formula told in words has none.
 std::string_view result_symbol(std::string_view formula) {
-    return formula.substr(0, formula.find(" = "));
+    const std::size_t end = formula.find(" = ");
+    return end == std::string_view::npos ? "result" : formula.substr(0, end);
 }
 
 std::string result_text(Results const& results, std::size_t row, Outcome outcome) {

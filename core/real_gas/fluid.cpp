@@ -2,8 +2,10 @@
 #include "core/real_gas/fluid.h"
 
 #include "core/failure.h"
-#include "core/text/characters.h"
+#include "core/substances/stoichiometric_text.h"
 #include "core/written.h"
+
+#include <cmath>
 
 namespace core::real_gas {
 namespace {
@@ -26,12 +28,18 @@ Fluid::Fluid(substances::Gas gas) {
 
 std::string Fluid::written() const {
     if (ideal_) return ideal_->written();
-    return std::string(parts_.front().critical.name);
+    std::string text;
+    for (auto const& [critical, x] : parts_)
+        text += (text.empty() ? "" : " + ") + (parts_.size() > 1 ? core::written(x) + ' ' : "") +
+                std::string(critical.name);
+    return text;
 }
 
 MolarMass Fluid::molar_mass() const {
     if (ideal_) return ideal_->molar_mass();
-    return MolarMass::from_value(parts_.front().critical.molar_mass);
+    double mass = 0;
+    for (auto const& [critical, x] : parts_) mass += x * critical.molar_mass;
+    return MolarMass::from_value(mass);
 }
 
 substances::Gas const& Fluid::ideal_gas() const {
@@ -41,13 +49,23 @@ substances::Gas const& Fluid::ideal_gas() const {
         "use ENTROPY.DEPARTURE and ENTHALPY.DEPARTURE, and add the ideal part of your own");
 }
 
-Fluid read_fluid(std::string_view text, Notes const& notes) {
+Fluid read_fluid(std::string_view text) {
+    std::optional<Failure> reason;
     try {
-        return Fluid(substances::read_gas(text, notes));
-    } catch (Failure const&) {
-        if (CriticalPoint const* found = find_critical_point(text)) return Fluid(*found);
-        throw;
+        return Fluid(substances::read_gas(text));
+    } catch (Failure& failure) {
+        reason = std::move(failure);
     }
+    std::vector<Part> parts;
+    double sum = 0;
+    for (substances::Term const& term : substances::read_terms(text, text)) {
+        CriticalPoint const* found = find_critical_point(term.substance);
+        if (!found) throw Failure(*reason);
+        parts.push_back({*found, term.coefficient});
+        sum += term.coefficient;
+    }
+    if (!(std::abs(sum - 1) <= 1e-6)) throw Failure(*reason);
+    return Fluid(std::move(parts));
 }
 
 } // namespace core::real_gas

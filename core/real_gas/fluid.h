@@ -1,7 +1,6 @@
 // SPDX-License-Identifier: MPL-2.0
 #pragma once
 
-#include "core/notes.h"
 #include "core/quantities.h"
 #include "core/real_gas/critical_point.h"
 #include "core/substances/gas.h"
@@ -26,8 +25,9 @@ class Fluid {
 public:
     /// Refuses a gas of which the project has no critical constants (#VALUE!).
     explicit Fluid(substances::Gas gas);
-    /// One fluid by its constants alone.
+    /// By constants alone: one fluid, or parts whose fractions sum to 1.
     explicit Fluid(CriticalPoint const& critical) : parts_{{critical, 1}} {}
+    explicit Fluid(std::vector<Part> parts) : parts_(std::move(parts)) {}
 
     std::span<const Part> parts() const { return parts_; }
     std::string written() const;
@@ -42,6 +42,6 @@ private:
 
 /// Reads one fluid, `CO2`, `propane`, `R134a`, or a mixture, `0.9 CH4 + 0.1 C2H6`, as
 /// substances::read_gas does. Refuses fluids without critical constants (#VALUE!).
-Fluid read_fluid(std::string_view text, Notes const& notes = silent);
+Fluid read_fluid(std::string_view text);
 
 } // namespace core::real_gas

@@ -4,6 +4,8 @@
 #include "core/failure.h"
 #include "core/written.h"
 
+#include <algorithm>
+#include <cctype>
 #include <string>
 #include <utility>
 
@@ -48,8 +50,11 @@ SpecificEntropy entropy(Coordinate c) { return SpecificEntropy::from_value(c.si)
 } // namespace
 
 Coordinate read_dryness(std::string_view words) {
-    if (words == "saturated liquid") return {Kind::dryness, 0};
-    if (words == "saturated vapour") return {Kind::dryness, 1};
+    std::string small(words.substr(0, 60));
+    std::ranges::transform(small, small.begin(),
+                           [](unsigned char c) { return static_cast<char>(std::tolower(c)); });
+    if (small == "saturated liquid") return {Kind::dryness, 0};
+    if (small == "saturated vapour" || small == "saturated vapor") return {Kind::dryness, 1};
     refuse_unfit(std::string(words.substr(0, 60)),
                  "a quantity with its unit, `saturated liquid` or `saturated vapour`",
                  "write one of the two, or a number from 0 to 1");

@@ -16,7 +16,8 @@ struct Coordinate {
     double si;
 };
 
-/// The dryness that words name: `saturated liquid` 0, `saturated vapour` 1. Refuses others (#VALUE!).
+/// The dryness that words name, in any case, as AutoCorrect raises first letters: `saturated liquid` 0,
+/// `saturated vapour` 1. Refuses others (#VALUE!).
 Coordinate read_dryness(std::string_view words);
 
 /// The state that both fix, in either order. Refuses pairs that fix none or that the formulation cannot

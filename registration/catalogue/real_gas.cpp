@@ -48,21 +48,21 @@ constexpr const char* valid = "fluids that are not strongly polar, away from the
                               "mixtures with interaction parameters of zero";
 
 constexpr Entry entries[] = {
-    describe(
-        {.name = "ENTROPY.DEPARTURE",
-         .says = "Entropy of a real gas less that of the ideal gas at the same temperature and "
-                 "pressure.",
-         .arguments = {{fluid, temperature, pressure, equation_of_state, show}},
-         .forms = {form<at_state<entropy_departure>>("S - S(ideal), from the equation of state",
-                                                     equations, valid)},
-         .examples = {{{"ENTROPY.DEPARTURE(\"CO2\"; \"350 K\"; \"60 bar\")",
-                        -4.501852428286278}}}}),
+    describe({.name = "ENTROPY.DEPARTURE",
+              .says =
+                  "Entropy of a real gas less that of the ideal gas at the same temperature and "
+                  "pressure.",
+              .arguments = {{fluid, temperature, pressure, equation_of_state, show}},
+              .forms = {form<at_state<entropy_departure>>(
+                  "ΔS = S - S(ideal), from the equation of state", equations, valid)},
+              .examples = {{{"ENTROPY.DEPARTURE(\"CO2\"; \"350 K\"; \"60 bar\")",
+                             -4.501852428286278}}}}),
     describe({.name = "ENTHALPY.DEPARTURE",
               .says = "Enthalpy of a real gas less that of the ideal gas at the same temperature "
                       "and pressure.",
               .arguments = {{fluid, temperature, pressure, equation_of_state, show}},
               .forms = {form<at_state<enthalpy_departure>>(
-                  "H - H(ideal), from the equation of state", equations, valid)},
+                  "ΔH = H - H(ideal), from the equation of state", equations, valid)},
               .examples = {{{"ENTHALPY.DEPARTURE(\"CO2\"; \"350 K\"; \"60 bar\"; \"Soave\"; "
                              "\"kJ/mol\")",
                              -2.079058219778648}}}}),

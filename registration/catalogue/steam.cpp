@@ -71,8 +71,8 @@ constexpr Entry entries[] = {
         {.name = "ENTROPY.STEAM",
          .says = "Specific entropy of water or steam in the state that two quantities fix.",
          .arguments = {{first, second, amount, show}},
-         .forms = {form<of_state<&State::entropy>>("s(first, second), the industrial formulation",
-                                                   release, valid)},
+         .forms = {form<of_state<&State::entropy>>(
+             "s = s(first, second), the industrial formulation", release, valid)},
          // R7-97, table 5: 0.392294792 kJ/(kg·K)
          .examples = {{{"ENTROPY.STEAM(\"300 K\"; \"3 MPa\"; ; \"kJ/(kg·K)\")",
                         0.39229479240262427},
@@ -81,7 +81,7 @@ constexpr Entry entries[] = {
               .says = "Specific enthalpy of water or steam in the state that two quantities fix.",
               .arguments = {{first, second, amount, show}},
               .forms = {form<of_state<&State::enthalpy>>(
-                  "h(first, second), the industrial formulation", release, valid)},
+                  "h = h(first, second), the industrial formulation", release, valid)},
               // R7-97, table 15: 3335.68375 kJ/kg
               .examples = {{{"ENTHALPY.STEAM(\"0.0035 MPa\"; \"700 K\"; ; \"kJ/kg\")",
                              3335.683753731224}}}}),
@@ -89,22 +89,22 @@ constexpr Entry entries[] = {
               .says = "Specific volume of water or steam in the state that two quantities fix.",
               .arguments = {{first, second, amount, show}},
               .forms = {form<of_state<&State::volume>>(
-                  "v(first, second), the industrial formulation", release, valid)},
+                  "v = v(first, second), the industrial formulation", release, valid)},
               // R7-97, table 42: 1.38455090 m³/kg
               .examples = {{{"VOLUME.STEAM(\"1500 K\"; \"0.5 MPa\")", 1.38455089878153}}}}),
     describe(
         {.name = "ENERGY.STEAM",
          .says = "Specific internal energy of water or steam in the state that two quantities fix.",
          .arguments = {{first, second, amount, show}},
-         .forms = {form<of_state<&State::energy>>(
-             "u(first, second) = h - p · v, the industrial formulation", release, valid)},
+         .forms = {form<of_state<&State::energy>>("u = h - p · v, the industrial formulation",
+                                                  release, valid)},
          // R7-97, table 5: 112.324818 kJ/kg
          .examples = {{{"ENERGY.STEAM(\"300 K\"; \"3 MPa\"; ; \"kJ/kg\")", 112.3248179823783}}}}),
     describe({.name = "TEMPERATURE.STEAM",
               .says = "Temperature of water or steam in the state that two quantities fix.",
               .arguments = {{first, second, show}},
               .forms = {form<of_state<&State::temperature>>(
-                  "T(first, second), the industrial formulation", release, valid)},
+                  "T = T(first, second), the industrial formulation", release, valid)},
               // R7-97, table 36: 453.035632 K
               .examples = {{{"TEMPERATURE.STEAM(\"1 MPa\"; \"saturated liquid\")",
                              453.0356323914667}}}}),
@@ -112,14 +112,14 @@ constexpr Entry entries[] = {
               .says = "Pressure of water or steam in the state that two quantities fix.",
               .arguments = {{first, second, show}},
               .forms = {form<of_state<&State::pressure>>(
-                  "p(first, second), the industrial formulation", release, valid)},
+                  "p = p(first, second), the industrial formulation", release, valid)},
               // R7-97, table 35: 2.63889776 MPa
               .examples = {{{"PRESSURE.STEAM(\"500 K\"; \"saturated vapour\"; \"MPa\")",
                              2.638897756273222}}}}),
     describe({.name = "DRYNESS.STEAM",
               .says = "Mass fraction of vapour in wet steam, 0 to 1.",
               .arguments = {{first, second, show}},
-              .forms = {form<dryness_of_state>("x(first, second), the industrial formulation",
+              .forms = {form<dryness_of_state>("x = x(first, second), the industrial formulation",
                                                release, valid)},
               .examples = {{{"DRYNESS.STEAM(\"10 kPa\"; \"2100 kJ/kg\")", 0.7977124422953035}}}}),
     describe({.name = "EXERGY.STEAM",

@@ -154,6 +154,8 @@ TEST(ConstantGases, AreRefusedWithTheirReason) {
     expect_why("air, cp = 5 bar", "molar or specific heat capacity");
     expect_why("air, cp = -1 kJ/(kg·K)", "above 0");
     expect_why("air, cp = 1.005", "molar or specific");
+    expect_why("air, cv = 0.718 kJ/(kg·K)", "constant pressure");
+    expect_why("air, cp = 1.005 kJ/kg/K", "`1.005 kJ/(kg·K)`");
     expect_why("Xx, cp = 1.005 kJ/(kg·K)", "Xx");
     expect_why("1.005 kJ/(kg·K)", "heat capacity");
 }
@@ -192,6 +194,7 @@ TEST(RealGases, TakeTextsBlocksAndAWordForTheEquation) {
     EXPECT_NEAR(departure(block, Range()), departure("0.9 CH4 + 0.1 C2H6", "peng-robinson"), 1e-12);
     EXPECT_NE(departure(block, "Soave"), departure(block, Range()));
     EXPECT_LT(departure("R134a", Range()), 0);
+    EXPECT_LT(departure("0.5 CO2 + 0.5 R134a", Range()), 0);
     const auto reason = [](std::vector<Range> arguments) {
         arguments.resize(4);
         arguments.push_back("why");

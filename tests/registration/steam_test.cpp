@@ -57,6 +57,19 @@ TEST(Steam, ComesInColumnsAndAmounts) {
                 entropy("200 °C", "1 bar") * 0.018015268, 1e-9);
 }
 
+TEST(Steam, HasVolumesOfAmounts) {
+    const double v = number(call("VOLUME.STEAM", {"20 °C", "1 bar"}));
+    EXPECT_NEAR(number(call("VOLUME.STEAM", {"20 °C", "1 bar", "5 kg", "L"})), 5000 * v, 1e-9);
+    EXPECT_NEAR(number(call("VOLUME.STEAM", {"20 °C", "1 bar", "5 kg/h", "L/h"})), 5000 * v, 1e-9);
+    EXPECT_NEAR(number(call("VOLUME.STEAM", {"20 °C", "1 bar", "1 kmol"})), 18.015268 * v, 1e-12);
+}
+
+TEST(Steam, IsReadAsAutoCorrectLeavesIt) {
+    EXPECT_EQ(entropy("Saturated vapour", "1 bar"), entropy("saturated vapour", "1 bar"));
+    EXPECT_EQ(number(call("ENTROPY.VAPORIZATION", {"Steam", "100 °C"})),
+              number(call("ENTROPY.VAPORIZATION", {"steam", "100 °C"})));
+}
+
 TEST(Steam, CarriesUncertainties) {
     const double u =
         number(call("ENTHALPY.STEAM", {"500 °C ± 2 K", "80 bar", Range(), "uncertainty in kJ/kg"}));
