@@ -42,6 +42,12 @@ Gibbs gibbs_of_vapour(double pi, double tau, double shift) {
 }
 
 template<auto const& ideal, auto const& residual>
+Properties vapour(double t, double p, double tau, double shift) {
+    const double pi = reduced::pressure_2(p);
+    return of_gibbs(t, p, pi, tau, gibbs_of_vapour<ideal, residual>(pi, tau, shift));
+}
+
+template<auto const& ideal, auto const& residual>
 double entropy_of_vapour(double pi, double tau, double shift) {
     const Partials o = sum_of<ideal, Order::first>(1, tau);
     const Partials q = sum_of<residual, Order::first>(pi, tau - shift);
@@ -64,10 +70,8 @@ double entropy_1(double t, double p) {
 }
 
 Properties region_2(double t, double p) {
-    const double pi = reduced::pressure_2(p), tau = reduced::temperature_2(t);
-    return of_gibbs(
-        t, p, pi, tau,
-        gibbs_of_vapour<tables::region_2_ideal, tables::region_2_residual>(pi, tau, 0.5));
+    return vapour<tables::region_2_ideal, tables::region_2_residual>(
+        t, p, reduced::temperature_2(t), 0.5);
 }
 
 double entropy_2(double t, double p) {
@@ -76,16 +80,13 @@ double entropy_2(double t, double p) {
 }
 
 Properties metastable_vapour(double t, double p) {
-    const double pi = reduced::pressure_2(p), tau = reduced::temperature_2(t);
-    return of_gibbs(
-        t, p, pi, tau,
-        gibbs_of_vapour<tables::metastable_ideal, tables::metastable_residual>(pi, tau, 0.5));
+    return vapour<tables::metastable_ideal, tables::metastable_residual>(
+        t, p, reduced::temperature_2(t), 0.5);
 }
 
 Properties region_5(double t, double p) {
-    const double pi = reduced::pressure_2(p), tau = reduced::temperature_5(t);
-    return of_gibbs(t, p, pi, tau,
-                    gibbs_of_vapour<tables::region_5_ideal, tables::region_5_residual>(pi, tau, 0));
+    return vapour<tables::region_5_ideal, tables::region_5_residual>(t, p,
+                                                                     reduced::temperature_5(t), 0);
 }
 
 double entropy_5(double t, double p) {

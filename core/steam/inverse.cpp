@@ -249,6 +249,16 @@ Stretch falling_entropy(Stretch stretch, double t, double target) {
 
 double tolerance(double value) { return end_tolerance * std::abs(value) + 1e-9; }
 
+/// A quantity alone; entropy is had faster than with all else.
+double value_at(Quantity quantity, Stretch const& stretch, double t, double p) {
+    if (quantity == Quantity::entropy) {
+        if (stretch.region == Region::liquid) return entropy_1(t, p);
+        if (stretch.region == Region::vapour) return entropy_2(t, p);
+        if (stretch.region == Region::hot) return entropy_5(t, p);
+    }
+    return value(quantity, properties(stretch.region, t, p, stretch.side));
+}
+
 /// Values of a quantity at both ends of a stretch, rising with temperature or falling with pressure.
 struct Ends {
     double low, high;
@@ -259,9 +269,7 @@ Ends ends_on_isobar(Stretch const& stretch, double p, Quantity quantity) {
         const SaturatedPair pair = saturated_pair(stretch.low, p);
         return {value(quantity, pair.liquid), value(quantity, pair.vapour)};
     }
-    const auto at = [&](double t) {
-        return value(quantity, properties(stretch.region, t, p, stretch.side));
-    };
+    const auto at = [&](double t) { return value_at(quantity, stretch, t, p); };
     return {at(stretch.low), at(stretch.high)};
 }
 
@@ -270,9 +278,7 @@ Ends ends_on_isotherm(Stretch const& stretch, double t, Quantity quantity) {
         const SaturatedPair pair = saturated_pair(t, stretch.low);
         return {value(quantity, pair.vapour), value(quantity, pair.liquid)};
     }
-    const auto at = [&](double p) {
-        return value(quantity, properties(stretch.region, t, p, stretch.side));
-    };
+    const auto at = [&](double p) { return value_at(quantity, stretch, t, p); };
     return {at(stretch.low), at(stretch.high)};
 }
 

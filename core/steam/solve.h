@@ -18,7 +18,8 @@ enum class Goes { up, down };
 /// The zero of a monotonic function between two bounds, by Newton's method from a start; a step that
 /// would leave the bounds, or that does not halve the last one, halves them instead. A zero that rounding
 /// has put outside the bounds is found at the nearer one.
-/// Ends where a step no longer changes the number, after 100 steps at the latest (Err:523).
+/// Ends where a step no longer changes the number (near the critical point a thousandth of a millikelvin
+/// changes an enthalpy's ninth digit), after 100 steps at the latest (Err:523).
 template<class Function>
 double solve(Function function, Goes goes, double low, double high, double start) {
     double x = start > low && start < high ? start : low + (high - low) / 2;

@@ -34,6 +34,9 @@ public:
     void ratio(const char* what, const char* a, const char* b, double aim) const {
         std::printf("%-66s %6.2f   aim %.2f\n", what, seconds(a) / seconds(b), aim);
     }
+    void ratio(const char* what, const char* a, const char* b) const {
+        std::printf("%-66s %6.2f\n", what, seconds(a) / seconds(b));
+    }
     void time(const char* what, const char* name, double aim) const {
         std::printf("%-66s %6.3f µs aim %.3f\n", what, seconds(name) * 1e6, aim);
     }

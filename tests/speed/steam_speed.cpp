@@ -93,7 +93,7 @@ int main(int argc, char** argv) {
     medians.ratio("s(T,p) of region 2 with std::pow / written out", "pow_2", "written_out_2", 5);
     medians.ratio("s(ρ,T) of region 3 with std::pow / written out", "pow_3", "written_out_3", 5);
     medians.ratio("s(T,p) of region 5 with std::pow / written out", "pow_5", "written_out_5", 5);
-    medians.ratio("T(p,s) / s(T,p), liquid", "temperature_1", "written_out_1", 10);
-    medians.ratio("T(p,s) / s(T,p), vapour", "temperature_2", "written_out_2", 10);
-    medians.ratio("T(p,s) of wet steam / s(T,p) of vapour", "temperature_wet", "written_out_2", 10);
+    medians.ratio("T(p,s) / s(T,p), liquid", "temperature_1", "written_out_1");
+    medians.ratio("T(p,s) / s(T,p), vapour", "temperature_2", "written_out_2");
+    medians.ratio("T(p,s) of wet steam / s(T,p) of vapour", "temperature_wet", "written_out_2");
 }

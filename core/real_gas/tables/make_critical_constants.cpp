@@ -6,7 +6,7 @@
 //
 // It stops at a figure that is no number and at a fluid without a reference.
 
-#include "core/substances/tables/rows.h"
+#include "core/tables/rows.h"
 
 #include <cstdio>
 #include <exception>

@@ -6,7 +6,7 @@
 //
 // Digits go over as they are printed. It stops at a table it does not know and at one that is missing.
 
-#include "core/substances/tables/rows.h"
+#include "core/tables/rows.h"
 
 #include <array>
 #include <cstdio>

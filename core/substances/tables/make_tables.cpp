@@ -13,7 +13,7 @@
 #include "core/substances/table.h"
 #include "core/substances/tables/ladder.h"
 #include "core/substances/tables/model.h"
-#include "core/substances/tables/rows.h"
+#include "core/tables/rows.h"
 
 #include <algorithm>
 #include <array>

@@ -1,8 +1,9 @@
 // SPDX-License-Identifier: MPL-2.0
 #pragma once
 
-// A strict reader of the tables in this folder: lines `# ...`, a row of column names, rows of
-// values as comma-separated text with quotes where a value holds a comma.
+// A strict reader of the CSV tables that are turned into arrays when the project is built: lines
+// `# ...`, a row of column names, rows of values as comma-separated text with quotes where a value
+// holds a comma.
 
 #include <fstream>
 #include <stdexcept>
