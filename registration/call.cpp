@@ -220,7 +220,7 @@ private:
 
     std::string prose(Results const& results, Results const& per_amount, std::size_t row,
                       std::vector<std::string> const& noted, std::vector<std::string>& remarks) {
-        if (show_.view == View::source) return source(evaluation_);
+        if (show_.view == View::source) return source(evaluation_, row);
         if (show_.view == View::steps) return steps(evaluation_, results, per_amount, row, noted);
         if (Failure const* fault = results.fault(row)) return why(entry_, *fault);
         std::vector<std::string> all = remarks;

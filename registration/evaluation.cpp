@@ -250,7 +250,8 @@ void Evaluation::mark_rows() {
 
 bool Evaluation::names_substance() const {
     for (std::size_t i = 0; i < overload().needs.size(); ++i)
-        if (knows_molar_mass(overload().needs[i].kind) && !arguments_.inputs[i].missing())
+        if (!arguments_.inputs[i].missing() &&
+            knows_molar_mass(overload().needs[i], arguments_.inputs[i]))
             return true;
     return false;
 }
@@ -259,7 +260,7 @@ MolarMasses Evaluation::molar_masses() const {
     for (std::size_t i = 0; i < overload().needs.size(); ++i) {
         Need const& need = overload().needs[i];
         Given const& given = arguments_.inputs[i];
-        if (!knows_molar_mass(need.kind) || given.missing()) continue;
+        if (given.missing() || !knows_molar_mass(need, given)) continue;
         if (count_of(need, given) > 1) return {0, &given, need.kind};
         try {
             return {molar_mass_of(need.kind, given, 0), nullptr, need.kind};

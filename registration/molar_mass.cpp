@@ -5,8 +5,24 @@
 #include "core/substances/formula.h"
 #include "core/substances/substance.h"
 #include "registration/gas_argument.h"
+#include "registration/own_material.h"
+
+#include <optional>
 
 namespace registration {
+
+namespace {
+
+/// Of an own material; what is wrong with one that cannot be read is told where it is used.
+std::optional<core::MolarMass> stated_molar_mass(Given const& given) {
+    try {
+        return read_own_material(given, core::silent)->molar_mass();
+    } catch (core::Failure const&) {
+        return std::nullopt;
+    }
+}
+
+} // namespace
 
 bool tells_molar_mass(Given const& given) {
     for (std::size_t row = 0; row < given.cell_count() && row < 3; ++row) {
@@ -18,10 +34,21 @@ bool tells_molar_mass(Given const& given) {
     return false;
 }
 
-bool knows_molar_mass(Need::Kind kind) {
-    return kind == Need::Kind::named || kind == Need::Kind::substance || kind == Need::Kind::gas ||
-           kind == Need::Kind::fluid || kind == Need::Kind::constant_gas ||
-           kind == Need::Kind::steam || kind == Need::Kind::steam_word;
+bool knows_molar_mass(Need const& need, Given const& given) {
+    switch (need.kind) {
+    case Need::Kind::named:
+    case Need::Kind::substance:
+    case Need::Kind::gas:
+    case Need::Kind::fluid:
+    case Need::Kind::constant_gas:
+    case Need::Kind::steam:
+    case Need::Kind::steam_word:
+        return true;
+    case Need::Kind::material:
+        return stated_molar_mass(given).has_value();
+    default:
+        return false;
+    }
 }
 
 namespace {
@@ -33,7 +60,8 @@ double of_named(std::string_view text) {
     } catch (core::Failure const& failure) {
         try {
             return core::substances::find_substance(text).molar_mass().value();
-        } catch (core::Failure const&) {
+        } catch (core::Failure const& unknown) {
+            if (text == "steam") throw unknown; // it names what steam is asked of
             throw failure;
         }
     }
@@ -50,6 +78,7 @@ double molar_mass_of(Need::Kind kind, Given const& given, std::size_t row) {
         return read_constant_gas(given, row, core::silent).gas.molar_mass().value();
     if (kind == Need::Kind::steam || kind == Need::Kind::steam_word)
         return core::steam::molar_mass.value();
+    if (kind == Need::Kind::material) return stated_molar_mass(given).value().value();
     const std::string_view text = given.cell(row).text;
     if (kind == Need::Kind::substance)
         return core::substances::find_substance(text).molar_mass().value();

@@ -170,7 +170,7 @@ bool is_numeric(Need const& need, Given const& given) {
 }
 
 bool stands_for_all_rows(Need const& need, Given const& given) {
-    return given.cell_count() == 1 ||
+    return given.cell_count() == 1 || need.kind == Need::Kind::material ||
            ((need.kind == Need::Kind::gas || need.kind == Need::Kind::fluid) &&
             means_mixture(given));
 }

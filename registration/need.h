@@ -53,8 +53,8 @@ bool is_numeric(Need const&, Given const&);
 /// or volume per mass, a dryness.
 bool is_coordinate(Numbers const&);
 
-/// Whether an argument that is no column of numbers is one thing for all rows: one cell, or a
-/// mixture in a block.
+/// Whether an argument that is no column of numbers is one thing for all rows: one cell, a
+/// mixture or a material in a block.
 bool stands_for_all_rows(Need const&, Given const&);
 
 /// Whether the argument, as it stands, can be what the parameter needs.

@@ -3,6 +3,7 @@
 
 #include "core/constants.h"
 #include "core/text/quantity.h"
+#include "registration/figures.h"
 #include "registration/gas_argument.h"
 #include "registration/own_material.h"
 
@@ -181,10 +182,13 @@ std::string steps(Evaluation const& evaluation, Results const& results, Results 
     return text;
 }
 
-std::string source(Evaluation const& evaluation) {
+std::string source(Evaluation const& evaluation, std::size_t row) {
     Form const& form = evaluation.form();
     std::string text = std::string(form.formula) + "\nSource: " + form.source;
     if (form.valid[0]) text += std::string("\nValid: ") + form.valid;
+    for (Input const& input : stated_inputs(evaluation))
+        for (std::string const& line : figures_behind(*input.need, *input.given, row))
+            text += '\n' + line;
     text += "\nInputs: as given in the sheet";
     return text;
 }

@@ -15,7 +15,7 @@ std::string steps(Evaluation const&, Results const&, Results const& per_amount, 
                   std::vector<std::string> const& noted);
 
 /// Where the relation and the figures come from, and where it holds.
-std::string source(Evaluation const&);
+std::string source(Evaluation const&, std::size_t row);
 
 /// `ok`, with what should be known about the result.
 std::string why(std::vector<std::string> const& remarks);

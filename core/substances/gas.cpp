@@ -228,10 +228,12 @@ MolarEntropy entropy_standard_of_gas(Gas const& gas, Temperature temperature,
                                      std::optional<Positive<Pressure>> pressure,
                                      Notes const& notes) {
     const MolarEntropy at_one_bar = gas.entropy(temperature);
-    for (Component const& each : gas.components())
+    for (Component const& each : gas.components()) {
+        tell_uncertainty(each.substance, temperature, notes);
         notes.uncertainty([&] {
             return each.fraction * each.substance.entropy_uncertainty(temperature).value();
         });
+    }
     notes.step([&] { return "at 1 bar: " + written(at_one_bar); });
     notes.step([&] { return "of it -R · Σ x · ln x = " + written(of_mixing(gas.components())); });
     if (!pressure) return at_one_bar;

@@ -186,6 +186,17 @@ void remark_state(Substance const& substance, Temperature t, Notes const& notes)
     if (notes.hears_remarks()) remark_path(Path(substance, t, t), notes);
 }
 
+void tell_uncertainty(Substance const& substance, Temperature t, Notes const& notes) {
+    if (!notes.hears_steps()) return;
+    const MolarEntropy u = substance.entropy_uncertainty(t);
+    if (u.value() > 0)
+        notes.step([&] {
+            return substance.written() + ": u = " + written(u) +
+                   " of the entropy at 298.15 K, half of what CODATA Key Values for Thermodynamics "
+                   "(1989) prints for 95 %";
+        });
+}
+
 MolarHeatCapacity heat_capacity(Substance const& substance, Temperature temperature,
                                 Notes const& notes) {
     const MolarHeatCapacity cp = substance.heat_capacity(temperature);
@@ -200,6 +211,7 @@ MolarEntropy entropy_standard(Substance const& substance, Temperature temperatur
     const MolarEntropy at_one_bar = substance.entropy(temperature);
     notes.step([&] { return std::string(phase.name()) + " at 1 bar: " + written(at_one_bar); });
     remark_state(substance, temperature, notes);
+    tell_uncertainty(substance, temperature, notes);
     notes.uncertainty([&] { return substance.entropy_uncertainty(temperature).value(); });
     if (!pressure) return at_one_bar;
     if (phase.aggregation() != Aggregation::gas)

@@ -37,6 +37,9 @@ MolarEntropy entropy_standard(Substance const& substance, Temperature temperatur
                               std::optional<Positive<Pressure>> pressure = std::nullopt,
                               Notes const& notes = silent);
 
+/// Tells the published uncertainty of the absolute entropy, where there is one.
+void tell_uncertainty(Substance const& substance, Temperature temperature, Notes const& notes);
+
 /// Makes the remarks that hold for a state of the substance.
 void remark_state(Substance const& substance, Temperature temperature, Notes const& notes);
 

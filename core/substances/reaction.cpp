@@ -144,9 +144,11 @@ Temperature Reaction::to() const {
 
 MolarEntropy entropy_of_reaction(Reaction const& reaction, Temperature temperature,
                                  Notes const& notes) {
-    for (Participant const& each : reaction.participants)
+    for (Participant const& each : reaction.participants) {
+        tell_uncertainty(each.substance, temperature, notes);
         notes.uncertainty(
             [&] { return each.number * each.substance.entropy_uncertainty(temperature).value(); });
+    }
     return sum(
         reaction, temperature, "S°", [&](Substance const& s) { return s.entropy(temperature); },
         notes);

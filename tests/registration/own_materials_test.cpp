@@ -50,6 +50,14 @@ TEST(OwnMaterials, TakeAmountsOnTheirBasis) {
     EXPECT_EQ(text(call("ENTHALPY.HEATING", {table(), "300 K", "500 K", "2 mol"})), "#VALUE!");
 }
 
+TEST(OwnMaterials, TakeAmountsOnTheOtherBasisByTheirMolarMass) {
+    const std::string one_cell = text(call("MATERIAL.OF", {table(), "a", "50 g/mol"}));
+    EXPECT_NEAR(
+        number(call("ENTHALPY.HEATING", {one_cell.c_str(), "300 K", "500 K", "40 mol", "kJ"})), 180,
+        1e-9);
+    EXPECT_NEAR(number(call("HEAT.CAPACITY", {one_cell.c_str(), "300 K", "J/(mol·K)"})), 20, 1e-9);
+}
+
 TEST(OwnMaterials, PassTransitionsAndSpreads) {
     EXPECT_NEAR(number(call("ENTROPY.HEATING", {with_melting(), "300 K", "1000 K"})),
                 900 * std::log(800.0 / 300) + 390e3 / 800 + 1100 * std::log(1000.0 / 800), 1e-9);

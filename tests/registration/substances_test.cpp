@@ -244,4 +244,21 @@ TEST(Arrays, CurveHasUprightSteps) {
     EXPECT_EQ(text(call("CURVE.HEATING", {"Al", "800 K", "1000 K", 1.0})), "#NUM!");
 }
 
+TEST(Substances, NameReportAndPageOfTheirFigures) {
+    const auto source = [](const char* function, std::vector<Range> arguments) {
+        arguments.push_back("source");
+        return text(call(function, arguments));
+    };
+    const auto expect = [](std::string const& whole, std::string_view part) {
+        EXPECT_NE(whole.find(part), std::string::npos) << whole;
+    };
+    const std::string iron = source("ENTROPY.HEATING", {"Fe", "300 K", "1900 K", Range()});
+    expect(iron, "Fe, cr, γ: NASA/TP-2002-211556, App. D, p. ");
+    expect(iron, "Fe, l: NASA/TP-2002-211556, App. D, p. ");
+    expect(source("HEAT.CAPACITY", {"ZnO", "300 K"}), "ZnO, cr: USGS Bulletin 2131");
+    expect(source("ENTROPY.REACTION", {"CO + 1/2 O2 -> CO2", "300 K"}), "O2, g: NASA");
+    expect(source("ENTROPY.DEPARTURE", {"CO2", "300 K", "1 bar", Range()}), "Span");
+    expect(text(call("ENTROPY.STANDARD", {"Al", "300 K", Range(), "steps"})), "CODATA");
+}
+
 } // namespace
