@@ -65,8 +65,8 @@ Block block_of(Entry const& entry, std::span<const Block> blocks, Argument::Role
 }
 
 [[noreturn]] void refuse_lengths(int argument, std::size_t count, std::size_t other) {
-    Failure failure(Failure::Kind::unfit, std::to_string(count) + " rows",
-                    "columns of one length, here " + std::to_string(other) + " rows",
+    const auto rows = [](std::size_t n) { return std::to_string(n) + (n == 1 ? " row" : " rows"); };
+    Failure failure(Failure::Kind::unfit, rows(count), "columns of one length, here " + rows(other),
                     "select the same rows for every column");
     failure.argument = argument;
     throw failure;

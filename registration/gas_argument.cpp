@@ -94,7 +94,7 @@ class Mixture {
 public:
     Mixture(Sheet sheet, core::Notes const& notes) : sheet_(sheet) {
         std::size_t row = 0;
-        if (is_text(sheet.at(0, 1)) && !is_share(sheet.at(0, 1))) read_heading(sheet.at(row++, 1));
+        if (is_text(sheet.at(0, 1)) && !is_share(sheet.at(0, 1))) read_headings(row++);
         for (; row < sheet.rows(); ++row)
             if (sheet.at(row, 0).kind != Cell::Kind::blank ||
                 sheet.at(row, 1).kind != Cell::Kind::blank)
@@ -142,7 +142,13 @@ private:
         return kind_ == Kind::mole_fractions || kind_ == Kind::mass_fractions;
     }
 
-    void read_heading(Cell const& cell) {
+    void read_headings(std::size_t row) {
+        Cell const& cell = sheet_.at(row, 1);
+        if (sheet_.columns() == 3 && sheet_.at(row, 2).text != "u")
+            core::refuse_unfit("a third column headed `" + std::string(sheet_.at(row, 2).text) +
+                                   "`",
+                               "standard uncertainties under `u`, or two columns",
+                               "select the gases and their fractions or amounts alone");
         unit_ = core::text::read_heading(cell.text).unit;
         kind_ = kind_of(*unit_, cell.text);
     }

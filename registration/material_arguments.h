@@ -42,15 +42,22 @@ struct material_rows {
     Result only;
 };
 
+/// One that cannot be read tells its own reason before anything else is wrong.
+struct ReadableMaterial {
+    static void check(Given const& given) {
+        static_cast<void>(read_own_material(given, core::silent));
+    }
+};
+
 template<class Basis>
-struct argument<OwnMaterialOn<Basis>> : Unchecked {
+struct argument<OwnMaterialOn<Basis>> : ReadableMaterial {
     static constexpr Need need{.kind = Need::Kind::material,
                                .dimension = core::dimension<core::On<core::HeatCapacity, Basis>>,
                                .whole = true};
     using Rows = material_rows<OwnMaterialOn<Basis>>;
 };
 template<>
-struct argument<AnyOwnMaterial> : Unchecked {
+struct argument<AnyOwnMaterial> : ReadableMaterial {
     static constexpr Need need{.kind = Need::Kind::material, .whole = true};
     using Rows = material_rows<AnyOwnMaterial>;
 };

@@ -85,6 +85,8 @@ TEST(GasBlocks, AreRefusedWithTheirReason) {
     expect_why(Range::table({{"N2", 0.79}, {"Xx", 0.21}}), "Xx");
     expect_why(Range::table({{"gas", "mol%"}, {"N2", Range::blank()}, {"O2", 21.0}}),
                "without a fraction");
+    expect_why(Range::table({{"gas", "mol%", "x"}, {"N2", 79.0, 1.0}, {"O2", 21.0, 1.0}}),
+               "under `u`");
     expect_why(Range::table({{"gas", "mol%", "u"}, {"N2", 79.0, -1.0}, {"O2", 21.0, 0.1}}), "u");
 }
 

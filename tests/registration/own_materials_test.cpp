@@ -175,4 +175,13 @@ TEST(OwnMaterials, AreDrawnAsCurvesAndMelt) {
                 0.5, 1e-12);
 }
 
+TEST(OwnMaterials, ThatCannotBeReadTellTheirOwnReasonFirst) {
+    expect_why(
+        "ENTHALPY.HEATING",
+        {Range::table(
+             {{"T / °C", "cp / (J/(kg·K))", "u"}, {20.0, 460.0, 5.0}, {500.0, 640.0, "8 J"}}),
+         "20 °C", "500 °C", "3 kg", "why"},
+        "8 J");
+}
+
 } // namespace
