@@ -53,17 +53,17 @@ bool knows_molar_mass(Need const& need, Given const& given) {
 
 namespace {
 
-/// A formula, or else a name of the tables.
+/// A formula, or else a name of the tables. What is neither is told as a formula; `steam` as what it is.
 double of_named(std::string_view text) {
+    if (text == "steam") return core::substances::find_substance(text).molar_mass().value();
     try {
         return core::substances::molar_mass(text).value();
-    } catch (core::Failure const& failure) {
+    } catch (core::Failure const&) {
         try {
             return core::substances::find_substance(text).molar_mass().value();
-        } catch (core::Failure const& unknown) {
-            if (text == "steam") throw unknown; // it names what steam is asked of
-            throw failure;
+        } catch (core::Failure const&) {
         }
+        throw;
     }
 }
 

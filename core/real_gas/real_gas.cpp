@@ -33,38 +33,41 @@ bool is_one_of(std::span<const std::string_view> formulas, CriticalPoint const& 
     return std::ranges::find(formulas, critical.formula) != formulas.end();
 }
 
+void remark_part(CriticalPoint const& critical, Notes const& notes) {
+    const std::string name(critical.name);
+    if (is_one_of(quantum_gases, critical))
+        notes.remark([&] {
+            return name + " is a quantum gas: its acentric factor is a fit, departures are rough";
+        });
+    if (is_one_of(polar_fluids, critical))
+        notes.remark([&] {
+            return name + " is polar or associates: departures are good to some ten per cent";
+        });
+}
+
 void remark_fluid(Fluid const& fluid, double t, double p, Notes const& notes) {
-    for (auto const& [critical, x] : fluid.parts()) {
-        const std::string name(critical.name);
-        if (is_one_of(quantum_gases, critical))
-            notes.remark([&] {
-                return name +
-                       " is a quantum gas: its acentric factor is a fit, departures are rough";
-            });
-        if (is_one_of(polar_fluids, critical))
-            notes.remark([&] {
-                return name + " is polar or associates: departures are good to some ten per cent";
-            });
-        const double tr = t / critical.temperature, pr = p / critical.pressure;
-        if (fluid.parts().size() == 1 && std::abs(tr - 1) < 0.03 && std::abs(pr - 1) < 0.3)
-            notes.remark([&] { return "near the critical point, where the equation is rough"; });
-    }
-    if (fluid.parts().size() > 1)
+    for (Part const& part : fluid.parts()) remark_part(part.critical, notes);
+    if (fluid.parts().size() > 1) {
         notes.remark([] { return std::string("mixture with interaction parameters of zero"); });
+        return;
+    }
+    CriticalPoint const& critical = fluid.parts().front().critical;
+    if (std::abs(t / critical.temperature - 1) < 0.03 && std::abs(p / critical.pressure - 1) < 0.3)
+        notes.remark(
+            [] { return std::string("near the critical point, where the equation is rough"); });
+}
+
+std::string told(Part const& part, bool mixed, double t, double p) {
+    CriticalPoint const& c = part.critical;
+    return std::string(c.name) + (mixed ? ", x = " + written(part.fraction) : "") +
+           ": Tc = " + written(c.temperature) + " K, pc = " + written(c.pressure) +
+           " Pa, ω = " + written(c.acentric_factor) + " (" + std::string(c.reference) +
+           "), Tr = " + written(t / c.temperature) + ", pr = " + written(p / c.pressure);
 }
 
 void tell_fluid(Fluid const& fluid, double t, double p, Notes const& notes) {
-    for (auto const& [critical, x] : fluid.parts())
-        notes.step([&] {
-            return std::string(critical.name) +
-                   (fluid.parts().size() > 1 ? ", x = " + written(x) : "") +
-                   ": Tc = " + written(critical.temperature) +
-                   " K, pc = " + written(critical.pressure) +
-                   " Pa, ω = " + written(critical.acentric_factor) + " (" +
-                   std::string(critical.reference) +
-                   "), Tr = " + written(t / critical.temperature) +
-                   ", pr = " + written(p / critical.pressure);
-        });
+    for (Part const& part : fluid.parts())
+        notes.step([&] { return told(part, fluid.parts().size() > 1, t, p); });
 }
 
 CubicForm const& form_of(Equation equation) {

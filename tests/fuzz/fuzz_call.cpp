@@ -39,9 +39,39 @@ private:
 };
 
 /// Texts that get a call past its front door, so that the fuzzer reaches what lies behind.
-constexpr std::array<const char*, 16> known = {
-    "K",     "°C",    "kJ/mol",         "bar",   "bar(g)", "mol", "kg", "u",
-    "T / K", "300 K", "29.1 J/(mol·K)", "1 bar", "steps",  "why", "N2", "%"};
+constexpr std::array<const char*, 32> known = {
+    "K",
+    "°C",
+    "kJ/mol",
+    "bar",
+    "bar(g)",
+    "mol",
+    "kg",
+    "u",
+    "T / K",
+    "300 K",
+    "29.1 J/(mol·K)",
+    "1 bar",
+    "steps",
+    "why",
+    "N2",
+    "%",
+    "700 K",
+    "90 bar",
+    "2000 kJ/kg",
+    "5 kJ/(kg·K)",
+    "0.001 m³/kg",
+    "saturated vapour",
+    "steam",
+    "CO2",
+    "mol%",
+    "rest",
+    "cp / (J/(kg·K))",
+    "air, cp = 1 kJ/(kg·K)",
+    "virial",
+    "2 H2 + O2 -> 2 H2O(g)",
+    "uncertainty",
+    "material | T / K: 300 400 | cp / (J/(kg·K)): 1 2 | u: 0.1 0"};
 
 Cell cell(Bytes& bytes, std::vector<std::string>& texts) {
     switch (bytes.byte() % 5) {
