@@ -2,6 +2,7 @@
 #include "core/balance/stream_exergy.h"
 
 #include "core/constants.h"
+#include "core/failure.h"
 #include "core/ratio.h"
 #include "core/substances/heating.h"
 #include "core/written.h"
@@ -15,6 +16,16 @@ namespace {
 
 void tell(MolarEnergy enthalpy, MolarEntropy entropy, Notes const& notes) {
     notes.step([&] { return "h - h0 = " + written(enthalpy) + ", s - s0 = " + written(entropy); });
+}
+
+void check_gas_in_surroundings(substances::Gas const& gas, Temperature surroundings) {
+    if (gas.components().size() > 1 ||
+        gas.components().front().substance.is_gas_in_the_open(surroundings))
+        return;
+    refuse_impossible(
+        gas.written() + " in surroundings of " + written(surroundings),
+        "a gas that is one there too",
+        "leave the pressures out for the liquid or solid; for steam use EXERGY.STEAM");
 }
 
 } // namespace
@@ -42,6 +53,7 @@ MolarEnergy exergy_of_ideal_gas(Positive<MolarHeatCapacity> heat_capacity, Tempe
 MolarEnergy exergy_of_gas(substances::Gas const& gas, Temperature temperature,
                           Positive<Pressure> pressure, Temperature surroundings,
                           Positive<Pressure> surroundings_pressure, Notes const& notes) {
+    check_gas_in_surroundings(gas, surroundings);
     const MolarEnergy enthalpy = gas.enthalpy_between(surroundings, temperature);
     const MolarEntropy entropy = substances::entropy_of_gas(
         gas, surroundings, surroundings_pressure, temperature, pressure, notes);

@@ -42,7 +42,8 @@ MolarEnergy exergy_of_ideal_gas(Positive<MolarHeatCapacity> heat_capacity, Tempe
                                 Positive<Pressure> surroundings_pressure,
                                 Notes const& notes = silent);
 
-/// Ideal gas or mixture of the tables.
+/// Ideal gas or mixture of the tables. Refuses a single substance that is condensed in the surroundings:
+/// the way there would lead through condensation (#NUM!).
 MolarEnergy exergy_of_gas(substances::Gas const& gas, Temperature temperature,
                           Positive<Pressure> pressure, Temperature surroundings,
                           Positive<Pressure> surroundings_pressure, Notes const& notes = silent);

@@ -135,6 +135,13 @@ MolarEntropy Substance::entropy(Temperature t) const {
 
 MolarEnergy Substance::gibbs(Temperature t) const { return enthalpy(t) - absolute(t) * entropy(t); }
 
+bool Substance::is_gas_in_the_open(Temperature t) const {
+    const Substance in_any_state(views()[row().first_view]);
+    if (in_any_state.rungs().empty()) return false; // condensed, though only its gas is tabulated
+    return in_any_state.phase_at(std::clamp(t, in_any_state.from(), in_any_state.to()))
+               .aggregation() == Aggregation::gas;
+}
+
 MolarEntropy Substance::entropy_uncertainty(Temperature t) const {
     const Phase phase = phase_at(t);
     if (phase.aggregation() == Aggregation::gas) return phase.entropy_uncertainty();

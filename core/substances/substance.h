@@ -88,6 +88,8 @@ public:
     MolarEnergy enthalpy(Temperature) const;
     MolarEntropy entropy(Temperature) const;
     MolarEnergy gibbs(Temperature) const;
+    /// Whether in the open, at 1 bar, it is a gas at this temperature, whatever state is asked for.
+    bool is_gas_in_the_open(Temperature) const;
     /// Published standard uncertainty of the absolute entropy at 298.15 K that the one at the
     /// temperature is counted from: of the gas for a gas, of the crystal or liquid stable at
     /// 298.15 K for condensed phases; 0 where none is known.

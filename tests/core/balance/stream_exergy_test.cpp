@@ -3,6 +3,7 @@
 
 #include "core/constants.h"
 #include "tests/core/accuracy.h"
+#include "tests/core/expect_refusal.h"
 #include "tests/core/random_states.h"
 
 #include <gtest/gtest.h>
@@ -38,6 +39,19 @@ TEST(StreamExergy, IsZeroInTheSurroundingsAndNeverLess) {
     // R·T0·ln(p/p0) at the temperature of the surroundings
     EXPECT_NEAR(exergy_of_gas(air, kelvin(288), pascal(7e5), kelvin(288), pascal(1e5)).value(),
                 gas_constant.value() * 288 * std::log(7.0), 1e-9);
+}
+
+TEST(StreamExergy, OfWhatCondensesOnTheWayIsRefused) {
+    const auto exergy = [](const char* text) {
+        return [=] {
+            exergy_of_gas(substances::read_gas(text), kelvin(400), pascal(1e5), kelvin(290),
+                          pascal(1e5));
+        };
+    };
+    expect_refusal(impossible, "H2O(g) in surroundings of 290 K", "a gas", exergy("water"));
+    expect_refusal(impossible, "CH3OH(g)", "a gas", exergy("CH3OH(g)"));
+    EXPECT_NO_THROW(exergy("CO2")());
+    EXPECT_NO_THROW(exergy("0.9 N2 + 0.1 H2O(g)")());
 }
 
 // Three routes to the exergy of a constant heat capacity: closed form, own material, ideal gas at p0.
