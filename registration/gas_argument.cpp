@@ -222,6 +222,10 @@ private:
             core::refuse_unfit("`rest` among amounts", "an amount in every row",
                                "write the amount, or give fractions");
         has_rest_ = true;
+        if (others > 1 + fractions_tolerance && !moved_)
+            core::refuse_unfit("other fractions that sum to " + core::written(others),
+                               "a sum of 1 at most beside `rest`",
+                               "head percentages with their unit, such as `mol%` or `wt%`");
         rest->share = 1 - others;
     }
 

@@ -27,6 +27,13 @@ core::MolarEntropy vaporization_of(core::substances::Substance const& substance,
                                    core::Notes const& notes) {
     return core::substances::vaporization(substance, notes).entropy;
 }
+/// The tables know one boiling point, at 1 bar.
+core::MolarEntropy vaporization_elsewhere(core::substances::Substance const& substance,
+                                          core::Temperature) {
+    core::refuse_unfit(substance.written() + " with a temperature",
+                       "a substance alone, which boils where the tables say at 1 bar",
+                       "leave the temperature out, or write `steam` for water at a temperature");
+}
 core::MolarEntropy transition_of(core::substances::Substance const& substance,
                                  core::Temperature near, core::Notes const& notes) {
     return core::substances::transition_near(substance, near, notes).entropy;
@@ -81,7 +88,7 @@ constexpr Entry entries[] = {
                        "International Association for the Properties of Water and Steam, "
                        "R7-97(2012)",
                        "273.15 K to 647.096 K"),
-                   form<vaporization_of>(
+                   form<vaporization_of, vaporization_elsewhere>(
                        "ΔS = S(g) - S(l), at the boiling temperature of the tables", report,
                        at_one_bar)},
          .examples = {{{"ENTROPY.VAPORIZATION(\"40.651 kJ/mol\"; \"373.124 K\")",
