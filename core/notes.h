@@ -27,7 +27,9 @@ public:
     }
     template<class StandardUncertainty>
     void uncertainty(StandardUncertainty&& u) const {
-        if (variance_ != nullptr) *variance_ += u() * u();
+        if (variance_ == nullptr) return;
+        const double value = u();
+        *variance_ += value * value;
     }
     bool hears_steps() const { return steps_ != nullptr; }
     /// Whether it is worth finding out what to remark.

@@ -31,4 +31,16 @@ struct Block {
     }
 };
 
+/// A block seen upright: across, its rows are the sheet's columns.
+struct Grid {
+    Block block;
+    bool across;
+
+    std::size_t rows() const { return across ? block.columns : block.rows; }
+    std::size_t columns() const { return across ? block.rows : block.columns; }
+    Cell const& at(std::size_t row, std::size_t column) const {
+        return across ? block.at(column, row) : block.at(row, column);
+    }
+};
+
 } // namespace registration

@@ -40,29 +40,18 @@ bool is_share(Cell const& cell) {
     return cell.kind == Cell::Kind::number || is_rest(cell) || (is_text(cell) && !is_name(cell));
 }
 
-/// A block seen upright.
-struct Sheet {
-    Block block;
-    bool across;
+/// The last row of a mixture has a name and a share side by side.
+bool is_mixture(Grid const& grid) {
+    if (grid.columns() < 2 || grid.columns() > 3 || grid.rows() < 1) return false;
+    std::size_t last = grid.rows() - 1;
+    while (last > 0 && grid.at(last, 0).kind == Cell::Kind::blank) --last;
+    return is_name(grid.at(last, 0)) && is_share(grid.at(last, 1));
+}
 
-    std::size_t rows() const { return across ? block.columns : block.rows; }
-    std::size_t columns() const { return across ? block.rows : block.columns; }
-    Cell const& at(std::size_t row, std::size_t column) const {
-        return across ? block.at(column, row) : block.at(row, column);
-    }
-    /// Its last row has a name and a share side by side.
-    bool fits() const {
-        if (columns() < 2 || columns() > 3 || rows() < 1) return false;
-        std::size_t last = rows() - 1;
-        while (last > 0 && at(last, 0).kind == Cell::Kind::blank) --last;
-        return is_name(at(last, 0)) && is_share(at(last, 1));
-    }
-};
-
-std::optional<Sheet> sheet_of(Given const& given) {
+std::optional<Grid> mixture_in(Given const& given) {
     if (given.missing() || given.block().single()) return std::nullopt;
     for (const bool across : {false, true})
-        if (const Sheet sheet{given.block(), across}; sheet.fits()) return sheet;
+        if (const Grid grid{given.block(), across}; is_mixture(grid)) return grid;
     return std::nullopt;
 }
 
@@ -92,12 +81,12 @@ struct Part {
 /// Reads the block: the unit of its heading, or of each row.
 class Mixture {
 public:
-    Mixture(Sheet sheet, core::Notes const& notes) : sheet_(sheet) {
+    Mixture(Grid const& grid, core::Notes const& notes) : grid_(grid) {
         std::size_t row = 0;
-        if (is_text(sheet.at(0, 1)) && !is_share(sheet.at(0, 1))) read_headings(row++);
-        for (; row < sheet.rows(); ++row)
-            if (sheet.at(row, 0).kind != Cell::Kind::blank ||
-                sheet.at(row, 1).kind != Cell::Kind::blank)
+        if (is_text(grid.at(0, 1)) && !is_share(grid.at(0, 1))) read_headings(row++);
+        for (; row < grid.rows(); ++row)
+            if (grid.at(row, 0).kind != Cell::Kind::blank ||
+                grid.at(row, 1).kind != Cell::Kind::blank)
                 read_row(row, notes);
         if (parts_.empty())
             core::refuse_unfit("a block without gases", "gases beside their fractions",
@@ -143,10 +132,9 @@ private:
     }
 
     void read_headings(std::size_t row) {
-        Cell const& cell = sheet_.at(row, 1);
-        if (sheet_.columns() == 3 && sheet_.at(row, 2).text != "u")
-            core::refuse_unfit("a third column headed `" + std::string(sheet_.at(row, 2).text) +
-                                   "`",
+        Cell const& cell = grid_.at(row, 1);
+        if (grid_.columns() == 3 && grid_.at(row, 2).text != "u")
+            core::refuse_unfit("a third column headed `" + std::string(grid_.at(row, 2).text) + "`",
                                "standard uncertainties under `u`, or two columns",
                                "select the gases and their fractions or amounts alone");
         unit_ = core::text::read_heading(cell.text).unit;
@@ -154,12 +142,12 @@ private:
     }
 
     void read_row(std::size_t row, core::Notes const& notes) {
-        Cell const& name = sheet_.at(row, 0);
+        Cell const& name = grid_.at(row, 0);
         if (!is_text(name))
             core::refuse_unfit("row " + std::to_string(row + 1) + " without a gas",
                                "a gas in every row", "write the gas, or clear the row");
         Part part{core::substances::read_component(name.text, notes)};
-        Cell const& share = sheet_.at(row, 1);
+        Cell const& share = grid_.at(row, 1);
         if (share.kind == Cell::Kind::blank)
             core::refuse_unfit(std::string(name.text) + " without a fraction or amount",
                                "one beside every gas", "fill the cell in, or clear the row");
@@ -169,7 +157,7 @@ private:
             part.share = unit_ ? unit_->to_si(share.number) : share.number;
         else
             read_quantity(share, part);
-        if (sheet_.columns() == 3) read_uncertainty(sheet_.at(row, 2), part);
+        if (grid_.columns() == 3) read_uncertainty(grid_.at(row, 2), part);
         parts_.push_back(part);
     }
 
@@ -241,7 +229,7 @@ private:
                 "fraction may be the word `rest`");
     }
 
-    Sheet sheet_;
+    Grid grid_;
     std::optional<Unit> unit_;
     Kind kind_ = Kind::mole_fractions;
     bool has_rest_ = false, moved_ = false;
@@ -269,12 +257,12 @@ std::optional<Split> split(std::string_view text) {
 
 } // namespace
 
-bool means_mixture(Given const& given) { return sheet_of(given).has_value(); }
+bool means_mixture(Given const& given) { return mixture_in(given).has_value(); }
 
 Gas read_gas_argument(Given const& given, std::size_t row, core::Notes const& notes) {
-    const auto sheet = sheet_of(given);
-    if (!sheet) return core::substances::read_gas(given.cell(row).text, notes);
-    Mixture mixture(*sheet, notes);
+    const auto grid = mixture_in(given);
+    if (!grid) return core::substances::read_gas(given.cell(row).text, notes);
+    Mixture mixture(*grid, notes);
     mixture.move(given.moved_place());
     return mixture.made();
 }
@@ -312,8 +300,8 @@ ConstantGas read_constant_gas(Given const& given, std::size_t row, core::Notes c
 
 std::vector<Place> uncertain_places_of_gas(Given const& given) {
     std::vector<Place> places;
-    if (const auto sheet = sheet_of(given)) {
-        const Mixture mixture(*sheet, core::silent);
+    if (const auto grid = mixture_in(given)) {
+        const Mixture mixture(*grid, core::silent);
         for (std::size_t row = 0; row < mixture.parts().size(); ++row)
             if (const double u = mixture.parts()[row].u; u > 0) places.push_back({0, 0, row, u});
         return places;

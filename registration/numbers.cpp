@@ -21,18 +21,6 @@ using core::text::read_unit;
 
 constexpr double nothing = std::numeric_limits<double>::quiet_NaN();
 
-/// A block seen upright: across, its rows are the sheet's columns.
-struct Grid {
-    Block block;
-    bool across;
-
-    std::size_t rows() const { return across ? block.columns : block.rows; }
-    std::size_t columns() const { return across ? block.rows : block.columns; }
-    Cell const& at(std::size_t row, std::size_t column) const {
-        return across ? block.at(column, row) : block.at(row, column);
-    }
-};
-
 enum class Layout : std::uint8_t {
     bare,   ///< plain numbers
     texts,  ///< a text quantity in every row

@@ -27,7 +27,10 @@ struct read_argument : Unchecked {
             : given_(&given), index_(index) {
             if (stands_for_all_rows(need, given)) only_ = made(0, notes);
         }
-        T operator[](std::size_t row) const { return only_ ? *only_ : made(row, core::silent); }
+        /// Good until the next row: a gas that stands for all of them is not copied for each.
+        T const& operator[](std::size_t row) const {
+            return only_ ? *only_ : current_.emplace(made(row, core::silent));
+        }
 
     private:
         T made(std::size_t row, core::Notes const& notes) const {
@@ -41,6 +44,7 @@ struct read_argument : Unchecked {
         Given const* given_;
         int index_;
         std::optional<T> only_;
+        mutable std::optional<T> current_;
     };
 };
 

@@ -24,7 +24,7 @@ void check_range(double t, double p) {
                           "1 K to 10000 K and up to 1 GPa", "check the units");
 }
 
-constexpr std::array<std::string_view, 5> quantum_gases{"He", "H2", "D2", "Ne", "HD"};
+constexpr std::array<std::string_view, 4> quantum_gases{"He", "H2", "D2", "Ne"};
 constexpr std::array<std::string_view, 14> polar_fluids{"H2O", "D2O",   "NH3",   "HF",    "HCl",
                                                         "HBr", "CH4O",  "C2H6O", "C3H8O", "C2H4O2",
                                                         "HCN", "C2H3N", "C6H6O", "N2H4"};

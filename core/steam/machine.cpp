@@ -12,7 +12,7 @@ namespace core::steam {
 namespace {
 
 constexpr std::size_t most_points = 10'000;
-// Twice what the release lets regions differ by where they meet, in entropy.
+// What the release lets regions differ by where they meet, in entropy.
 constexpr double entropy_tolerance = 0.2;
 
 Properties critical_point() {

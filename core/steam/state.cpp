@@ -203,14 +203,6 @@ State at_pressure_and_dryness(Positive<Pressure> pressure, Fraction dryness, Not
     return state_of(mixed(saturation_temperature_at(p), p, dryness.value), notes);
 }
 
-Pressure saturation_pressure(Temperature temperature) {
-    return Pressure::from_value(saturation_pressure_at(saturated_temperature(temperature)));
-}
-
-Temperature saturation_temperature(Positive<Pressure> pressure) {
-    return Temperature::kelvin(saturation_temperature_at(saturated_pressure(pressure)));
-}
-
 SpecificEntropy entropy_of_vaporization(Temperature temperature, Notes const& notes) {
     const double t = saturated_temperature(temperature);
     const double p = saturation_pressure_at(t);

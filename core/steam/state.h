@@ -51,10 +51,6 @@ State at_temperature_and_volume(Temperature, Positive<SpecificVolume>, Notes con
 State at_temperature_and_dryness(Temperature, Fraction, Notes const& notes = silent);
 State at_pressure_and_dryness(Positive<Pressure>, Fraction, Notes const& notes = silent);
 
-/// Refuse what lies outside 273.15 K to 647.096 K, and the pressures that belong to them (#NUM!).
-Pressure saturation_pressure(Temperature);
-Temperature saturation_temperature(Positive<Pressure>);
-
 /// s'' - s' at saturation.
 SpecificEntropy entropy_of_vaporization(Temperature, Notes const& notes = silent);
 
